@@ -1,0 +1,143 @@
+import type { LimitId, LimitUnit, Verdict } from '../limits'
+
+/** Why a part or a figure is withheld; words for it live in lib/words. */
+export interface PartError {
+  /** 'twoPlugs', 'noRotor', 'unevenCap', 'formulaParserNotLoaded' or 'input' (a CalcError of the library). */
+  code: string
+  /** Dotted path in the scenario (`engine.…`, `sheet.…`). */
+  field: string
+  value: unknown
+  limit: unknown
+  unit: string | null
+  message: string
+  /** Character index in a formula. */
+  at?: number
+}
+
+export type Part<T> = ({ ok: true } & T) | { ok: false; error: PartError }
+
+export type ChannelName = 'primary' | 'backup'
+export type PerChannel<T> = Record<ChannelName, T>
+
+export interface CurvePoint {
+  rpm: number
+  deg: number
+}
+
+/** Where both channels fire, and what the engine makes, at one speed (full throttle). */
+export interface SpeedPoint {
+  rpm: number
+  primaryDeg: number
+  backupDeg: number
+  staggerDeg: number
+  staggerMs: number
+  staggerDistributorDeg: number
+  plateArcMm: number | null
+}
+
+export type MarkedSpeed = 'cranking' | 'idle' | 'runUp' | 'full'
+
+export interface PowerPoint {
+  rpm: number
+  primaryKw: number
+  backupKw: number
+  primaryNm: number
+  backupNm: number
+}
+
+export interface DeadCylinderRow {
+  dead: number
+  primary: { kw: number; fraction: number }
+  backup: { kw: number; fraction: number }
+}
+
+export interface RunUpExpectation {
+  rpm: number
+  dropRpm: number
+  /** Slowest and fastest speed of the band (throttle 0…−1, best torque 0…10° earlier). */
+  lowRpm: number
+  highRpm: number
+}
+
+export interface PropellerPoint {
+  rpm: number
+  kw: number
+  governed: boolean | null
+}
+
+export interface PropellerRow {
+  pitch: string
+  primary: PropellerPoint | null
+  backup: PropellerPoint | null
+  /** On the primary with one cylinder cold. */
+  oneCold: PropellerPoint | null
+}
+
+export interface RegisterRow {
+  /** Crank advance at the spark, the speed it belongs to. */
+  rpm: number
+  advanceDeg: number
+  startOffsetDeg: number
+  endOffsetDeg: number
+  /** Worst of the spark's start and end, distributor degrees. */
+  registerDeg: number
+  freeDeg: number
+}
+
+export interface Finding {
+  /** limit id, a dot, channel where there is one: `crankingAdvanceDeg.primary`. */
+  id: string
+  limitId: LimitId
+  channel: ChannelName | null
+  verdict: Verdict
+  /** null: there is no such value (no speed proves full timing), judged outside. */
+  value: number | null
+  /** The limit in the value's own terms (proof speed: idle speed + the allowed excess). */
+  limit: number
+  sense: 'atMost' | 'atLeast'
+  closeBand: number
+  unit: LimitUnit
+  /** Figures the sentence needs, by name. */
+  data: Record<string, number | string | boolean | null>
+  /** Dotted paths of the inputs that drive it (`sheet.primary.schedule`). */
+  inputs: string[]
+  sourceIds: string[]
+  /** Anchor of its equation. */
+  method: string
+}
+
+export interface ScenarioNotice {
+  code: string
+  severity: 'info' | 'warning'
+  field: string
+  value: number | string | null
+  limit: number | string | null
+  source: string | null
+}
+
+export interface ScenarioParts {
+  speeds: Part<{ points: Record<MarkedSpeed, SpeedPoint> }>
+  curves: Part<{ rising: PerChannel<CurvePoint[]>; falling: PerChannel<CurvePoint[] | null> }>
+  stagger: Part<{ curve: SpeedPoint[]; atCranking: SpeedPoint; atIdle: SpeedPoint; atMax: SpeedPoint; smallest: SpeedPoint; largest: SpeedPoint; backupEverFirst: boolean }>
+  power: Part<{ curve: PowerPoint[]; atMax: PowerPoint; backupToPrimary: number; shortOfMbtDeg: PerChannel<number>; curveAssumed: boolean }>
+  deadCylinders: Part<{ rpm: number; frictionPowerKw: number; rows: DeadCylinderRow[] }>
+  runUp: Part<{ rows: ({ pitch: string; loadKw: number } & PerChannel<RunUpExpectation>)[]; torqueRatio: PerChannel<number> }>
+  propeller: Part<{ rows: PropellerRow[] }>
+  register: Part<{ worst: PerChannel<RegisterRow>; bestPhasingDeg: PerChannel<number> }>
+  leads: Part<{ expected: number[]; actual: number[]; outOfPlace: number }>
+  proof: Part<{ rpm: PerChannel<number | null>; toleranceDeg: number }>
+  marks: Part<{ mmPerDeg: number }>
+}
+
+export type PartName = keyof ScenarioParts
+
+export interface ScenarioResult {
+  calcVersion: string
+  parts: ScenarioParts
+  /** Ranked: outside, close, within; worst first in each. */
+  findings: Finding[]
+  counts: Record<Verdict, number>
+  notices: ScenarioNotice[]
+  /** Ids of sources.ts the results used. */
+  sourceIds: string[]
+}
