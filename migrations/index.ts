@@ -1,0 +1,6 @@
+import { Migration20261201042125_people } from './Migration20261201042125_people'
+
+/** Every migration in order, for the migrator that runs inside another process (tests); the CLI reads the folder. */
+export const migrationsList = [
+  { name: 'Migration20261201042125_people', class: Migration20261201042125_people },
+]
