@@ -35,6 +35,9 @@ export interface SpeedPoint {
   plateArcMm: number | null
 }
 
+/** A stagger alone: on either side of a crank-retard jump, or an extreme. */
+export type StaggerPoint = Omit<SpeedPoint, 'primaryDeg' | 'backupDeg'>
+
 export type MarkedSpeed = 'cranking' | 'idle' | 'runUp' | 'full'
 
 export interface PowerPoint {
@@ -118,7 +121,7 @@ export interface ScenarioNotice {
 export interface ScenarioParts {
   speeds: Part<{ points: Record<MarkedSpeed, SpeedPoint> }>
   curves: Part<{ rising: PerChannel<CurvePoint[]>; falling: PerChannel<CurvePoint[] | null> }>
-  stagger: Part<{ curve: SpeedPoint[]; atCranking: SpeedPoint; atIdle: SpeedPoint; atMax: SpeedPoint; smallest: SpeedPoint; largest: SpeedPoint; backupEverFirst: boolean }>
+  stagger: Part<{ curve: StaggerPoint[]; atCranking: StaggerPoint; atIdle: StaggerPoint; atMax: StaggerPoint; smallest: StaggerPoint; largest: StaggerPoint; backupEverFirst: boolean }>
   power: Part<{ curve: PowerPoint[]; atMax: PowerPoint; backupToPrimary: number; shortOfMbtDeg: PerChannel<number>; curveAssumed: boolean }>
   deadCylinders: Part<{ rpm: number; frictionPowerKw: number; rows: DeadCylinderRow[] }>
   runUp: Part<{ rows: ({ pitch: string; loadKw: number } & PerChannel<RunUpExpectation>)[]; torqueRatio: PerChannel<number> }>
