@@ -3,7 +3,7 @@ import fs from 'node:fs'
 import path from 'node:path'
 import { Failure, fileSentence } from './failure.mjs'
 import { dataFolder, root } from './paths.mjs'
-import { isRoot, ownerFor, runAs } from './pg-programs.mjs'
+import { isRoot, ownerFor, postgresIds, runAs } from './pg-programs.mjs'
 
 /** For a checkout that the database user cannot enter, such as one below root's home; one folder a checkout. */
 export const farFolder = (/** @type {string} */ checkout) =>
@@ -28,7 +28,7 @@ function makeReachable(folder) {
   try {
     fs.mkdirSync(folder, { recursive: true, mode: 0o700 })
     if (!isRoot) return true
-    const owner = ownerFor(folder)
+    const owner = postgresIds()
     if (!owner) throw new Failure('There is no user postgres on this machine to run the database as: install the package postgresql, or start as an ordinary user.')
     // The folders above are made with root's umask; they only need to let the database user through.
     for (const parent of [path.dirname(folder), path.dirname(path.dirname(folder))])

@@ -28,17 +28,23 @@ export function installedPrograms() {
 export const majorOf = (text) => Number(/\bPostgreSQL\)? (\d+)/.exec(text)?.[1] ?? 0)
 
 /**
- * The ids to run the server programs under: PostgreSQL refuses root, so root hands over to the folder's owner,
- * or to the postgres user for a new folder. Undefined when the current user runs them itself.
- * @param {string} folder
+ * The ids of the user postgres, whom Debian makes with the server package; undefined without one.
  * @returns {{ uid: number, gid: number } | undefined}
+ */
+export function postgresIds() {
+  const [uid, gid] = ['-u', '-g'].map((flag) => Number(spawnSync('id', [flag, 'postgres'], { encoding: 'utf8' }).stdout))
+  return uid && gid ? { uid, gid } : undefined
+}
+
+/**
+ * The ids to run the server programs under: PostgreSQL refuses root, so root hands over to the folder's owner,
+ * or to the user postgres for a new folder. Undefined when the current user runs them itself.
+ * @param {string} folder
  */
 export function ownerFor(folder) {
   if (!isRoot) return undefined
   const stat = fs.statSync(folder, { throwIfNoEntry: false })
-  if (stat && stat.uid !== 0) return { uid: stat.uid, gid: stat.gid }
-  const [uid, gid] = ['-u', '-g'].map((flag) => Number(spawnSync('id', [flag, 'postgres'], { encoding: 'utf8' }).stdout?.trim() || NaN))
-  return uid && gid ? { uid, gid } : undefined
+  return stat && stat.uid !== 0 ? { uid: stat.uid, gid: stat.gid } : postgresIds()
 }
 
 /**
