@@ -31,9 +31,9 @@ export const engineFieldsBySection: Record<EngineSection, readonly FieldDef[]> =
     { name: 'intervalsDeg', label: 'Firing intervals', kind: 'list', optional: true, help: 'Crank degrees from each firing to the next, adding up to 720. Leave empty for even firing.' },
   ],
   geometry: [
-    { name: 'boreMm', label: 'Bore', kind: 'number', quantity: 'length', min: 20, max: 300 },
-    { name: 'strokeMm', label: 'Stroke', kind: 'number', quantity: 'length', min: 20, max: 300 },
-    { name: 'rodMm', label: 'Connecting rod, centre to centre', kind: 'number', quantity: 'length', min: 30, max: 600 },
+    { name: 'boreMm', label: 'Bore', kind: 'number', quantity: 'boreLength', min: 20, max: 300 },
+    { name: 'strokeMm', label: 'Stroke', kind: 'number', quantity: 'boreLength', min: 20, max: 300 },
+    { name: 'rodMm', label: 'Connecting rod, centre to centre', kind: 'number', quantity: 'boreLength', min: 30, max: 600 },
     { name: 'compressionRatio', label: 'Compression ratio', kind: 'number', quantity: 'ratio', min: 3, max: 20 },
   ],
   power: [

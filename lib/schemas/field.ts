@@ -1,4 +1,4 @@
-import type { QuantityKind } from '../units/quantities'
+import type { QuantityKind } from '../units'
 
 /** One input of a form: its name, its words, its range. Form, action, route and error sentences all read this table. */
 export interface FieldDef {

@@ -1,9 +1,10 @@
 import type { LimitId, LimitUnit, Verdict } from '../limits'
+import type { Notice } from '../notice'
 
 /** Why a part or a figure is withheld; words for it live in lib/words. */
 export interface PartError {
-  /** 'twoPlugs', 'noRotor', 'unevenCap', 'formulaParserNotLoaded' or 'input' (a CalcError of the library). */
-  code: string
+  /** 'input' is a CalcError of the library: something typed that cannot be computed with. The others are withheld with a reason. */
+  code: 'input' | 'formulaParserNotLoaded' | 'twoPlugs' | 'noRotor' | 'unevenCap' | 'noTorque' | 'runUpOutside'
   /** Dotted path in the scenario (`engine.…`, `sheet.…`). */
   field: string
   value: unknown
@@ -109,15 +110,6 @@ export interface Finding {
   method: string
 }
 
-export interface ScenarioNotice {
-  code: string
-  severity: 'info' | 'warning'
-  field: string
-  value: number | string | null
-  limit: number | string | null
-  source: string | null
-}
-
 export interface ScenarioParts {
   speeds: Part<{ points: Record<MarkedSpeed, SpeedPoint> }>
   curves: Part<{ rising: PerChannel<CurvePoint[]>; falling: PerChannel<CurvePoint[] | null> }>
@@ -140,7 +132,7 @@ export interface ScenarioResult {
   /** Ranked: outside, close, within; worst first in each. */
   findings: Finding[]
   counts: Record<Verdict, number>
-  notices: ScenarioNotice[]
+  notices: Notice[]
   /** Ids of sources.ts the results used. */
   sourceIds: string[]
 }

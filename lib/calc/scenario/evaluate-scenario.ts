@@ -1,0 +1,88 @@
+import { arcMm } from '../angle/arc'
+import { staggerReport } from '../advance/stagger-report'
+import { defaultLimits, type Limits } from '../limits'
+import type { Notice } from '../notice'
+import { calcVersion } from '../version'
+import { findingsOf } from './findings'
+import { part } from './part'
+import { curvePowerKw, deadCylindersPart, powerPart } from './power-parts'
+import { propellerPart, runUpPart } from './propeller-parts'
+import { proofPart } from './proof-part'
+import { leadsPart, registerPart } from './register-part'
+import type { CurvePoint, PartError, PerChannel, ScenarioParts, ScenarioResult } from './result-types'
+import type { Scenario } from './scenario-types'
+import { advanceCurves, markedPoints, staggerCurve, staggerPoint } from './speed-points'
+
+/** Rated power and curve may differ by this share before it is said. */
+const curveAgreement = 0.02
+
+/** Published curvatures, per degree²: Crossley and Cook's surface to the steep end of Heywood's class of curve. */
+const publishedCurvature = [1.8e-4, 4e-4] as const
+
+/**
+ * The closed-form evaluation of a whole scenario: every part, the findings ranked, their counts, and what to know beside them.
+ * Never throws for a part: what cannot be computed stands as `{ ok: false, error }` and the others go on.
+ *
+ * @param scenario engine and sheet, checked by their schemas (angles in crank degrees, rpm, mm, kW, kPa)
+ * @param limits what the scenario is judged by; the defaults of `limits.ts` unless given
+ * @throws nothing for anything a schema lets through; a programming error is not caught
+ * Source: the equations of the functions it composes; limits from their own table.
+ */
+export function evaluateScenario(scenario: Scenario, limits: Limits = defaultLimits): ScenarioResult {
+  const { engine, sheet } = scenario
+  const curves = part(() => advanceCurves(scenario))
+  const stagger = part(() => {
+    const { atCranking, atIdle, atMax, smallest, largest, backupEverFirst } = staggerReport(sheet.primary, sheet.backup, {
+      crankingRpm: engine.crankingRpm, idleRpm: engine.idleRpm, maxRpm: engine.maxRpm, mapKpa: sheet.manifold.fullKpa,
+    })
+    const at = (point: { rpm: number; staggerDeg: number }) => staggerPoint(scenario, point.rpm, point.staggerDeg)
+    return {
+      curve: curves.ok ? staggerCurve(scenario, curves.rising) : [],
+      atCranking: at(atCranking), atIdle: at(atIdle), atMax: at(atMax), smallest: at(smallest), largest: at(largest), backupEverFirst,
+    }
+  })
+  const sampled: PerChannel<CurvePoint[]>[] = curves.ok
+    ? [curves.rising, { primary: curves.falling.primary ?? [], backup: curves.falling.backup ?? [] }]
+    : []
+  const parts: ScenarioParts = {
+    speeds: part(() => ({ points: markedPoints(scenario) })),
+    curves,
+    stagger,
+    power: part(() => powerPart(scenario)),
+    deadCylinders: part(() => deadCylindersPart(scenario)),
+    runUp: part(() => runUpPart(scenario)),
+    propeller: part(() => propellerPart(scenario)),
+    register: curves.ok ? part(() => registerPart(scenario, sampled)) : { ok: false, error: curves.error },
+    leads: part(() => leadsPart(scenario)),
+    proof: part(() => proofPart(scenario)),
+    marks: part(() => ({ mmPerDeg: arcMm(engine.damperDiameterMm, 1) })),
+  }
+  const findings = findingsOf(scenario, parts, limits)
+  const count = (verdict: string) => findings.filter((finding) => finding.verdict === verdict).length
+  const notices = noticesOf(scenario)
+  const sourceIds = [...findings.flatMap((finding) => finding.sourceIds), ...notices.map((notice) => notice.source), 'heywood-1988']
+  return {
+    calcVersion, parts, findings, notices,
+    counts: { outside: count('outside'), close: count('close'), within: count('within') },
+    sourceIds: [...new Set(sourceIds)].sort(),
+  }
+}
+
+/** Figures that were computed, but outside what their source covers or against another figure given. */
+function noticesOf({ engine, sheet }: Scenario): Notice[] {
+  const notices: Notice[] = []
+  const [mildest, steepest] = publishedCurvature
+  const { curvaturePerDeg2 } = sheet.mbt
+  if (curvaturePerDeg2 > steepest || curvaturePerDeg2 < mildest)
+    notices.push({ code: 'curvatureOutsidePublished', severity: 'caution', field: 'sheet.mbt.curvaturePerDeg2', value: curvaturePerDeg2, limit: `${mildest} … ${steepest}`, source: 'crossley-cook-1991' })
+  if (engine.powerCurve.length < 2)
+    notices.push({ code: 'powerCurveAssumed', severity: 'info', field: 'engine.powerCurve', value: engine.ratedPowerKw, limit: 'constant torque', source: 'trade' })
+  const onCurve = engine.powerCurve.length < 2 ? null : curvePowerKw(engine.powerCurve, engine.ratedRpm)
+  if (onCurve !== null && Math.abs(onCurve / engine.ratedPowerKw - 1) > curveAgreement)
+    notices.push({ code: 'ratedPowerOffCurve', severity: 'caution', field: 'engine.ratedPowerKw', value: engine.ratedPowerKw, limit: String(onCurve), source: 'trade' })
+  return notices
+}
+
+/** What was typed that the library cannot compute with: a scenario that has one is not saved. */
+export const inputErrors = (result: ScenarioResult): PartError[] =>
+  Object.values(result.parts).flatMap((each) => (!each.ok && (each.error.code === 'input' || each.error.code === 'formulaParserNotLoaded' || each.error.code === 'runUpOutside') ? [each.error] : []))

@@ -1,0 +1,152 @@
+import { staggerReport } from '../advance/stagger-report'
+import { judge, type LimitId, type Limits, type Verdict } from '../limits'
+import type { ChannelName, CurvePoint, Finding, PerChannel, ScenarioParts } from './result-types'
+import type { Scenario } from './scenario-types'
+import { advanceAt, channelNames, dependsOnPressure } from './speed-points'
+
+/** Speeds looked at between slowest and fastest cranking, rpm apart. */
+const crankingStepRpm = 5
+
+interface Draft {
+  limitId: LimitId
+  channel: ChannelName | null
+  value: number | null
+  /** Replaces the limit's own value where it is relative (idle speed + the allowed excess). */
+  limit?: number
+  data: Finding['data']
+  inputs: string[]
+  sourceIds: string[]
+  method: string
+}
+
+const scheduleInputs = (channel: ChannelName) => [`sheet.${channel}.schedule`, `sheet.${channel}.latencyUs`]
+
+/** Pressures (kPa) a pressure-following channel is judged at; the others need one only. */
+function pressuresOf({ sheet }: Scenario): number[] {
+  const { idleKpa, runUpKpa, fullKpa } = sheet.manifold
+  return channelNames.some((channel) => dependsOnPressure(sheet[channel])) ? [fullKpa, runUpKpa, idleKpa] : [fullKpa]
+}
+
+/** Greatest advance while the starter turns: slow cranking of a weak battery to the fastest, before and after a first fire. */
+function crankingDraft(scenario: Scenario, channel: ChannelName): Draft {
+  const { crankingSlowestRpm, crankingFastestRpm } = scenario.engine
+  const steps = Math.ceil((crankingFastestRpm - crankingSlowestRpm) / crankingStepRpm)
+  let worst = { rpm: crankingSlowestRpm, deg: -Infinity, released: false }
+  for (const kpa of pressuresOf(scenario)) for (const trend of ['rising', 'falling'] as const) for (let i = 0; i <= steps; i += 1) {
+    const rpm = i === steps ? crankingFastestRpm : crankingSlowestRpm + i * crankingStepRpm
+    const deg = advanceAt(scenario, channel, rpm, kpa, trend)
+    if (deg > worst.deg + 1e-12) worst = { rpm, deg, released: trend === 'falling' }
+  }
+  return {
+    limitId: 'crankingAdvanceDeg', channel, value: worst.deg,
+    data: { rpm: worst.rpm, released: worst.released, slowestRpm: crankingSlowestRpm, fastestRpm: crankingFastestRpm },
+    inputs: [...scheduleInputs(channel), `sheet.${channel}.crankRetard`, 'engine.crankingSlowestRpm', 'engine.crankingFastestRpm'],
+    sourceIds: ['trade'], method: 'spark-advance',
+  }
+}
+
+/** The retard's band between cranking and idle: its lower edge above the fastest cranking, its upper edge below the slowest idle. */
+function retardDrafts({ engine, sheet }: Scenario, channel: ChannelName): Draft[] {
+  const retard = sheet[channel].crankRetard
+  if (!retard || retard.byDeg === 0) return []
+  const hysteresisRpm = retard.hysteresisRpm ?? 0
+  const shared = { channel, inputs: [`sheet.${channel}.crankRetard`], sourceIds: ['trade'], method: 'spark-advance' }
+  return [
+    {
+      ...shared, limitId: 'retardAboveCrankingRpm', value: retard.belowRpm - hysteresisRpm - engine.crankingFastestRpm,
+      data: { belowRpm: retard.belowRpm, hysteresisRpm, fastestRpm: engine.crankingFastestRpm, byDeg: retard.byDeg },
+    },
+    {
+      ...shared, limitId: 'retardBelowIdleRpm', value: engine.idleSlowestRpm - retard.belowRpm,
+      data: { belowRpm: retard.belowRpm, slowestRpm: engine.idleSlowestRpm, byDeg: retard.byDeg },
+    },
+  ]
+}
+
+/** Most advance beyond best torque from idle up, at full throttle and without retard. */
+function beyondMbtDraft({ sheet }: Scenario, channel: ChannelName, curve: CurvePoint[], idleRpm: number): Draft {
+  let worst: CurvePoint = { rpm: idleRpm, deg: -Infinity }
+  for (const point of curve) if (point.rpm >= idleRpm && point.deg > worst.deg + 1e-12) worst = point
+  return {
+    limitId: 'beyondMbtDeg', channel, value: worst.deg - sheet.mbt.deg,
+    data: { rpm: worst.rpm, deg: worst.deg, mbtDeg: sheet.mbt.deg, provenance: sheet.mbt.provenance },
+    inputs: [...scheduleInputs(channel), 'sheet.mbt'], sourceIds: ['heywood-1988', 'crossley-cook-1991'], method: 'timing-torque',
+  }
+}
+
+/** Smallest stagger over cranking to full power, both ways of the hysteresis, at every pressure that matters. */
+function backupFirstDraft(scenario: Scenario): Draft {
+  const { engine, sheet } = scenario
+  const reports = pressuresOf(scenario).flatMap((mapKpa) => (['rising', 'falling'] as const).map((trend) => staggerReport(sheet.primary, sheet.backup, {
+    crankingRpm: engine.crankingSlowestRpm, idleRpm: engine.idleRpm, maxRpm: engine.maxRpm, mapKpa, trend,
+  }).smallest))
+  const smallest = reports.reduce((least, point) => (point.staggerDeg < least.staggerDeg - 1e-12 ? point : least))
+  return {
+    limitId: 'backupFirstDeg', channel: null, value: smallest.staggerDeg, data: { rpm: smallest.rpm, staggerMs: smallest.staggerMs },
+    inputs: ['sheet.primary', 'sheet.backup'], sourceIds: ['trade'], method: 'stagger',
+  }
+}
+
+function proofDraft(scenario: Scenario, channel: ChannelName, proof: { rpm: PerChannel<number | null>; toleranceDeg: number }, limits: Limits): Draft {
+  const { engine, sheet } = scenario
+  return {
+    limitId: 'proofAboveIdleRpm', channel, value: proof.rpm[channel], limit: engine.idleRpm + limits.proofAboveIdleRpm.value,
+    data: { idleRpm: engine.idleRpm, maxRpm: engine.maxRpm, toleranceDeg: proof.toleranceDeg, followsPressure: dependsOnPressure(sheet[channel]) },
+    inputs: [...scheduleInputs(channel), `sheet.${channel}.crankRetard`, 'sheet.tolerances', 'engine.idleRpm'], sourceIds: ['trade'], method: 'proof-speed',
+  }
+}
+
+/** Every finding the computed parts allow; a part that failed gives none. */
+function drafts(scenario: Scenario, parts: ScenarioParts, limits: Limits): Draft[] {
+  const { engine, sheet } = scenario
+  const { curves, power, register, leads, proof, marks } = parts
+  const list: Draft[] = []
+  const add = (compute: () => Draft | Draft[]) => list.push(...[compute()].flat())
+  for (const channel of channelNames) {
+    if (!curves.ok) continue
+    add(() => beyondMbtDraft(scenario, channel, curves.falling[channel] ?? curves.rising[channel], engine.idleSlowestRpm))
+    add(() => crankingDraft(scenario, channel))
+    add(() => retardDrafts(scenario, channel))
+  }
+  if (curves.ok && parts.stagger.ok) add(() => backupFirstDraft(scenario))
+  if (power.ok) add(() => ({
+    limitId: 'backupPowerRatio', channel: 'backup', value: power.backupToPrimary,
+    data: { rpm: engine.maxRpm, primaryKw: power.atMax.primaryKw, backupKw: power.atMax.backupKw, shortOfMbtDeg: power.shortOfMbtDeg.backup },
+    inputs: ['sheet.primary', 'sheet.backup', 'sheet.mbt'], sourceIds: ['heywood-1988', 'crossley-cook-1991', 'trade'], method: 'timing-torque',
+  }))
+  if (proof.ok) for (const channel of channelNames) add(() => proofDraft(scenario, channel, proof, limits))
+  if (register.ok) for (const channel of channelNames) {
+    const { rpm, registerDeg, freeDeg, endOffsetDeg } = register.worst[channel]
+    const phasedAtDeg = channel === 'backup' && sheet.distribution === 'capEach' ? sheet.rotor.backupPhasedAtDeg : sheet.rotor.phasedAtDeg
+    const shared = { channel, data: { rpm, endOffsetDeg, phasedAtDeg, bestPhasingDeg: register.bestPhasingDeg[channel], sparkDurationMs: sheet.rotor.sparkDurationMs }, inputs: ['sheet.rotor', `sheet.${channel}`], sourceIds: ['trade'], method: 'rotor-register' }
+    add(() => [{ ...shared, limitId: 'registerDeg', value: registerDeg }, { ...shared, limitId: 'freeDeg', value: freeDeg }])
+  }
+  if (leads.ok) add(() => ({
+    limitId: 'leadsOutOfPlace', channel: null, value: leads.outOfPlace,
+    data: { expected: leads.expected.join(' '), actual: leads.actual.join(' '), rotation: engine.distributorRotation },
+    inputs: ['engine.capTerminals', 'engine.firingOrder', 'engine.distributorRotation'], sourceIds: ['trade'], method: 'firing-schedule',
+  }))
+  if (marks.ok) add(() => ({
+    limitId: 'markSpacingMm', channel: null, value: marks.mmPerDeg, data: { diameterMm: engine.damperDiameterMm },
+    inputs: ['engine.damperDiameterMm'], sourceIds: ['timing-arithmetic'], method: 'arc',
+  }))
+  return list
+}
+
+const rank: Record<Verdict, number> = { outside: 0, close: 1, within: 2 }
+
+/** How far inside its limit, in close bands (or in units where there is no band): the less, the worse. */
+const roomOf = ({ value, limit, sense, closeBand }: Finding) =>
+  value === null ? -Infinity : (sense === 'atMost' ? limit - value : value - limit) / (closeBand || 1)
+
+export function findingsOf(scenario: Scenario, parts: ScenarioParts, limits: Limits): Finding[] {
+  return drafts(scenario, parts, limits).map(({ limit: relative, ...draft }): Finding => {
+    const { sense, value, closeBand, unit } = limits[draft.limitId]
+    const limit = relative ?? value
+    return {
+      ...draft, limit, sense, closeBand, unit,
+      id: draft.channel ? `${draft.limitId}.${draft.channel}` : draft.limitId,
+      verdict: judge(draft.value, { sense, value: limit, closeBand }),
+    }
+  }).sort((left, right) => rank[left.verdict] - rank[right.verdict] || roomOf(left) - roomOf(right))
+}
