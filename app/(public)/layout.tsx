@@ -1,0 +1,5 @@
+import type { ReactNode } from 'react'
+
+export default function PublicLayout({ children }: { children: ReactNode }) {
+  return children
+}

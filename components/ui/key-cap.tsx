@@ -1,0 +1,3 @@
+export function KeyCap({ children }: { children: string }) {
+  return <kbd>{children}</kbd>
+}
