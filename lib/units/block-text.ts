@@ -1,13 +1,12 @@
+import type { QuantityKind } from './quantities'
 import { plainText } from './unit-text'
 
-/**
- * A pasted block as lines of cells.
- *
- * What parts the columns is decided once for a whole block. A tab anywhere: tabs. Else a semicolon anywhere: semicolons. Else runs of two
- * or more spaces, single spaces and commas are all tried; a reading counts only if every line comes out right, and if two readings come out
- * right with different numbers the block is refused: "100 285,5" may be 100 and 285.5, or 100285 and 5. So a comma parts columns only in
- * text whose decimals have points. No-break spaces never part columns: they stand inside numbers.
- */
+/** A column of a pasted block: what stands in it, and its name in the sentences. */
+export interface Column {
+  kind: QuantityKind
+  label: string
+}
+
 export interface Line {
   /** Counted from 1 in the text as pasted, blank lines included. */
   number: number
@@ -40,7 +39,12 @@ export function linesOf(text: string): Line[] {
     .filter((line) => plainText(line.text) !== '')
 }
 
-/** The ways in which this block may be parted into columns; a block of one column without tabs or semicolons is not parted at all. */
+/**
+ * The ways in which this block may be parted into columns, decided once for a whole block. A tab anywhere: tabs. Else a semicolon anywhere: semicolons. Else runs of two
+ * or more spaces, single spaces and commas are all tried, see `settle`; a reading counts only if every line comes out right, and if two readings come out
+ * right with different numbers the block is refused: "100 285,5" may be 100 and 285.5, or 100285 and 5. So a comma parts columns only in
+ * text whose decimals have points. No-break spaces never part columns: they stand inside numbers. A block of one column without tabs or semicolons is not parted at all.
+ */
 export function splittersFor(lines: readonly Line[], isOneColumn = false): Splitter[] {
   const has = (pattern: RegExp) => lines.some((line) => pattern.test(line.text.trim()))
   // A leading tab is an empty first cell, so the untrimmed text decides.

@@ -1,5 +1,5 @@
 import { linesOf, settle, splittersFor, startsAsNumber, tooManyLines } from './block-text'
-import type { Line, LineError, Reading, Splitter } from './block-text'
+import type { Column, Line, LineError, Reading, Splitter } from './block-text'
 import { findFamily, findUnit } from './families'
 import type { Unit } from './families'
 import { formatInput } from './format'
@@ -7,23 +7,22 @@ import { parseQuantity } from './parse'
 import { quantityOf, shownIn } from './quantities'
 import type { UnitSystem } from './quantities'
 import { quantityErrorSentence } from './sentences'
-import type { Column } from './table-text'
 
 /** What stands down the first column, along the first row, and in the field. */
 export interface MatrixShape {
-  rows: Column
-  columns: Column
-  values: Column
+  row: Column
+  column: Column
+  cell: Column
 }
 
 export interface Matrix {
   rows: number[]
   columns: number[]
-  /** `values[i][j]` at `rows[i]`, `columns[j]`; all in base units. */
-  values: number[][]
+  /** `cells[i][j]` at `rows[i]`, `columns[j]`; all in base units. */
+  cells: number[][]
 }
 
-export type MatrixResult = ({ ok: true } & Matrix) | { ok: false; errors: LineError[] }
+export type MatrixResult = { ok: true; matrix: Matrix } | { ok: false; errors: LineError[] }
 
 /**
  * A map pasted as a block: the first line holds the columns' heads (pressures), each further line its row's head (a speed) and the values. The
@@ -35,21 +34,21 @@ export function parseMatrix(text: string, shape: MatrixShape, system: UnitSystem
   const extra = tooManyLines(lines)
   if (extra !== null) return { ok: false, errors: [extra] }
   if (lines.length < 2) {
-    const sentence = `A map needs a first line with ${shape.columns.label}, then one line for each ${shape.rows.label}.`
+    const sentence = `A map needs a first line with ${shape.column.label}, then one line for each ${shape.row.label}.`
     return { ok: false, errors: [{ line: lines[0]?.number ?? 1, column: null, sentence }] }
   }
   const settled = settle(splittersFor(lines).map((splitter) => readMatrix(lines, splitter, shape, system)))
-  return settled.ok ? { ok: true, ...settled.value } : settled
+  return settled.ok ? { ok: true, matrix: settled.value } : settled
 }
 
 function readMatrix(lines: readonly Line[], splitter: Splitter, shape: MatrixShape, system: UnitSystem): Reading<Matrix> {
-  const reading: Reading<Matrix> = { value: { rows: [], columns: [], values: [] }, errors: [], misfits: 0, lines: [] }
+  const reading: Reading<Matrix> = { value: { rows: [], columns: [], cells: [] }, errors: [], misfits: 0, lines: [] }
   const [first, ...body] = lines.map((line) => ({ number: line.number, cells: splitter(line.text) }))
   const width = body[0]?.cells.length ?? 0
   if (first === undefined || width < 2) {
     const line = body[0]?.number ?? 1
     reading.misfits += lines.length
-    reading.errors.push({ line, column: null, sentence: `Line ${line} holds one value where ${shape.rows.label} and at least one ${shape.values.label} are expected. Part the columns with tabs or semicolons.` })
+    reading.errors.push({ line, column: null, sentence: `Line ${line} holds one value where ${shape.row.label} and at least one ${shape.cell.label} are expected. Part the columns with tabs or semicolons.` })
     return reading
   }
 
@@ -69,7 +68,7 @@ function readMatrix(lines: readonly Line[], splitter: Splitter, shape: MatrixSha
   if (!hasCorner && first.cells.length !== width - 1) misfit(first.number, first.cells.length, width - 1)
   else {
     const offset = hasCorner ? 1 : 0
-    reading.value.columns = first.cells.slice(offset).map((text, j) => cell(text, first.number, j + 1 + offset, shape.columns, units.columns))
+    reading.value.columns = first.cells.slice(offset).map((text, j) => cell(text, first.number, j + 1 + offset, shape.column, units.columns))
     reading.lines.push({ number: first.number, values: reading.value.columns })
   }
   for (const { number, cells } of body) {
@@ -78,10 +77,10 @@ function readMatrix(lines: readonly Line[], splitter: Splitter, shape: MatrixSha
       continue
     }
     const [head = '', ...rest] = cells
-    const row = cell(head, number, 1, shape.rows, units.rows)
-    const values = rest.map((text, j) => cell(text, number, j + 2, shape.values))
+    const row = cell(head, number, 1, shape.row, units.rows)
+    const values = rest.map((text, j) => cell(text, number, j + 2, shape.cell))
     reading.value.rows.push(row)
-    reading.value.values.push(values)
+    reading.value.cells.push(values)
     reading.lines.push({ number, values: [row, ...values] })
   }
   return reading
@@ -89,7 +88,7 @@ function readMatrix(lines: readonly Line[], splitter: Splitter, shape: MatrixSha
 
 function cornerUnits(corner: string, line: number, shape: MatrixShape, system: UnitSystem, errors: LineError[]): { rows?: Unit; columns?: Unit } {
   if (startsAsNumber(corner)) {
-    errors.push({ line, column: 1, sentence: `Line ${line}: the corner holds ${corner}, a number that belongs to nothing. Leave it empty; the first line holds ${shape.columns.label}, the first column ${shape.rows.label}.` })
+    errors.push({ line, column: 1, sentence: `Line ${line}: the corner holds ${corner}, a number that belongs to nothing. Leave it empty; the first line holds ${shape.column.label}, the first column ${shape.row.label}.` })
     return {}
   }
   const parts = /[\\|]/.test(corner) ? corner.split(/[\\|]/) : corner.split('/')
@@ -104,16 +103,16 @@ function cornerUnits(corner: string, line: number, shape: MatrixShape, system: U
     }
     return unit ?? undefined
   }
-  return parts.length === 2 ? { rows: unitFor(parts[0], shape.rows), columns: unitFor(parts[1], shape.columns) } : {}
+  return parts.length === 2 ? { rows: unitFor(parts[0], shape.row), columns: unitFor(parts[1], shape.column) } : {}
 }
 
 /** A map in base units as lines of tabs, units in the corner: what `parseMatrix` reads back, to the six digits shown, in either system. */
 export function formatMatrix(matrix: Matrix, shape: MatrixShape, system: UnitSystem): string {
   const symbol = ({ kind }: Column) => shownIn(kind, system).unit.symbol
-  const first = [`${symbol(shape.rows)} \\ ${symbol(shape.columns)}`, ...matrix.columns.map((value) => formatInput(value, shape.columns.kind, system))]
+  const first = [`${symbol(shape.row)} \\ ${symbol(shape.column)}`, ...matrix.columns.map((value) => formatInput(value, shape.column.kind, system))]
   const body = matrix.rows.map((row, i) => [
-    formatInput(row, shape.rows.kind, system),
-    ...(matrix.values[i] ?? []).map((value) => formatInput(value, shape.values.kind, system)),
+    formatInput(row, shape.row.kind, system),
+    ...(matrix.cells[i] ?? []).map((value) => formatInput(value, shape.cell.kind, system)),
   ])
   return [first, ...body].map((cells) => cells.join('\t')).join('\n')
 }
@@ -121,7 +120,7 @@ export function formatMatrix(matrix: Matrix, shape: MatrixShape, system: UnitSys
 /** Like `parseMatrix`, but a text box nobody touched gives back the very map it was filled from. */
 export function keepUntouchedMatrix(text: string, shape: MatrixShape, system: UnitSystem, baseMatrix: Matrix | null): MatrixResult {
   if (baseMatrix !== null && text.replace(/\r\n?/g, '\n').trim() === formatMatrix(baseMatrix, shape, system)) {
-    return { ok: true, rows: [...baseMatrix.rows], columns: [...baseMatrix.columns], values: baseMatrix.values.map((row) => [...row]) }
+    return { ok: true, matrix: structuredClone(baseMatrix) }
   }
   return parseMatrix(text, shape, system)
 }

@@ -1,4 +1,4 @@
-import { families } from './families'
+import { convert, families } from './families'
 import { formatInput } from './format'
 import type { QuantityError } from './parse'
 import { quantityOf, shownIn } from './quantities'
@@ -56,15 +56,40 @@ export function quantityErrorSentence(error: QuantityError, label: string, kind:
   }
 }
 
-/** The allowed range in the person's own units, for a value that was read but lies outside it. Ends are in base units. */
-export function rangeSentence(label: string, kind: QuantityKind, system: UnitSystem, range: { min?: number; above?: number; max?: number; below?: number }): string {
-  const { symbol, joined } = shownIn(kind, system).unit
-  const end = (value: number) => formatInput(value, kind, system).replace('-', '−') + (symbol === '' ? '' : (joined ? '' : '\u00a0') + symbol)
+/** Ends of a range in base units. */
+export interface Range {
+  min?: number
+  above?: number
+  max?: number
+  below?: number
+}
+
+/**
+ * An end of a range as it may be typed. Where the base unit is another one the end is cut to four digits inwards: 20 mm is 0.787402 in, and
+ * "at least 0.7874 in" would name a value that is itself refused.
+ */
+function endText(value: number, kind: QuantityKind, system: UnitSystem, inwards: 'up' | 'down'): string {
+  const { base } = quantityOf(kind)
+  const { unit } = shownIn(kind, system)
+  let text = formatInput(value, kind, system)
+  if (unit !== base && Number(text) !== 0) {
+    const converted = convert(value, base, unit)
+    const step = 10 ** (Math.floor(Math.log10(Math.abs(converted))) - 3)
+    const steps = converted / step
+    const near = Math.round(steps)
+    const isDust = Math.abs(steps - near) < 1e-6
+    text = String(Number(((isDust ? near : inwards === 'up' ? Math.ceil(steps) : Math.floor(steps)) * step).toPrecision(4)))
+  }
+  return text.replace('-', '−') + (unit.symbol === '' ? '' : (unit.joined ? '' : '\u00a0') + unit.symbol)
+}
+
+/** The allowed range in the person's own units, for a value that was read but lies outside it. */
+export function rangeSentence(label: string, kind: QuantityKind, system: UnitSystem, range: Range): string {
   const parts: string[] = []
-  if (range.min !== undefined) parts.push(`at least ${end(range.min)}`)
-  if (range.above !== undefined) parts.push(`more than ${end(range.above)}`)
-  if (range.max !== undefined) parts.push(`at most ${end(range.max)}`)
-  if (range.below !== undefined) parts.push(`less than ${end(range.below)}`)
+  if (range.min !== undefined) parts.push(`at least ${endText(range.min, kind, system, 'up')}`)
+  if (range.above !== undefined) parts.push(`more than ${endText(range.above, kind, system, 'up')}`)
+  if (range.max !== undefined) parts.push(`at most ${endText(range.max, kind, system, 'down')}`)
+  if (range.below !== undefined) parts.push(`less than ${endText(range.below, kind, system, 'down')}`)
   if (parts.length === 0) throw new RangeError('A range sentence needs at least one end')
   return `${label} must be ${parts.join(' and ')}.`
 }

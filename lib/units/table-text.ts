@@ -1,17 +1,12 @@
 import { linesOf, settle, splittersFor, startsAsNumber, tooManyLines } from './block-text'
-import type { Line, LineError, Reading, Splitter } from './block-text'
+import type { Column, Line, LineError, Reading, Splitter } from './block-text'
 import { findFamily, findUnit } from './families'
 import type { Unit } from './families'
 import { formatInput } from './format'
 import { parseQuantity } from './parse'
 import { quantityOf, shownIn } from './quantities'
-import type { QuantityKind, UnitSystem } from './quantities'
+import type { UnitSystem } from './quantities'
 import { quantityErrorSentence } from './sentences'
-
-export interface Column {
-  kind: QuantityKind
-  label: string
-}
 
 export interface Table {
   /** In base units, one inner list a line. */
