@@ -13,3 +13,10 @@ const pool = (): pg.Pool =>
 export const authPool = {
   query: (query: string | pg.QueryConfig, values?: unknown[]) => pool().query(query, values),
 } as unknown as pg.Pool
+
+/** For scripts and tests, which end. */
+export async function closeAuthPool(): Promise<void> {
+  const open = globalSlot.halfspeedAuthPool
+  globalSlot.halfspeedAuthPool = undefined
+  await open?.end()
+}

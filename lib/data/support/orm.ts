@@ -29,3 +29,10 @@ export async function newEm(): Promise<EntityManager> {
 
 /** The same unit of work for all server components of one request. Only for reads. */
 export const requestEm = cache(newEm)
+
+/** For scripts and tests, which end. */
+export async function closeOrm(): Promise<void> {
+  const slot = globalSlot.halfspeedOrm
+  globalSlot.halfspeedOrm = undefined
+  if (slot) await (await slot.orm).close(true)
+}

@@ -1,0 +1,7 @@
+import { setTheme } from '@/app/actions'
+import { formOf } from '../../support/next-mocks'
+import { declare } from '../declare'
+
+export const shell = [
+  declare(setTheme, { needs: 'public', args: () => [formOf({ theme: 'dark' })] }),
+]
