@@ -17,7 +17,7 @@ type Recipe<F extends Callable, T> = {
   /** Makes a fresh row of `world.shop`, written by `author`, and returns what the call needs to name it. Without it the call names no row. */
   prepare?: (world: World, author: Actor) => Promise<T>
   /** The arguments of the call. `actor` is the caller; someone signed out gets the stranger here. */
-  args: (call: Call<T>) => Parameters<F> | Promise<Parameters<F>>
+  args: (call: Call<T>) => Parameters<F>
 }
 
 export type Declaration = {
@@ -38,7 +38,7 @@ export function declare<F extends Callable, T = undefined>(of: F, { needs, own, 
     namesRow: prepare !== undefined,
     ready: async (world, actor, author) => {
       const target = prepare ? await prepare(world, author) : undefined as T
-      const list = await args({ actor, target, world })
+      const list = args({ actor, target, world })
       return () => of(...list)
     },
   }
