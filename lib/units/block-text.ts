@@ -58,7 +58,8 @@ export function splittersFor(lines: readonly Line[], isOneColumn = false): Split
   return splitters
 }
 
-export const startsAsNumber = (cell: string) => /^[+-]? ?[.,]?\d/.test(plainText(cell))
+/** Digits at its start make a cell a number; the unit 1/min is none. */
+export const startsAsNumber = (cell: string) => /^[+-]? ?[.,]?\d(?!\/[a-z°])/i.test(plainText(cell))
 
 /** One attempt at a block: `lines` holds the numbers of each line, in order, for telling two attempts apart. */
 export interface Reading<T> {

@@ -44,7 +44,7 @@ const second = unit('s', 1e6, ['sec', 'second', 'seconds'])
 export const millimetre = unit('mm', 1, ['millimetre', 'millimetres', 'millimeter', 'millimeters'])
 const centimetre = unit('cm', 10, ['centimetre', 'centimetres', 'centimeter', 'centimeters'])
 export const metre = unit('m', 1000, ['metre', 'metres', 'meter', 'meters'])
-export const inch = unit('in', 25.4, ['inch', 'inches', '"'])
+export const inch = unit('in', 25.4, ['inch', 'inches', '"'], { word: 'inches' })
 export const foot = unit('ft', 304.8, ['foot', 'feet', "'"])
 
 export const cubicCentimetre = unit('cc', 1, ['cm3', 'ccm', 'ml'])
@@ -91,8 +91,8 @@ const milePerHour = unit('mph', 0.44704, ['mi/h'])
 export const footPerMinute = unit('ft/min', 0.00508, ['fpm', 'feet/min'])
 
 export const perSquareDegree = unit('per deg²', 1, ['/deg²', '1/deg²', '/°²', '1/°²', 'per °²', 'deg-2', '°-2'])
-export const millimetrePerDegree = unit('mm/°', 1, ['mm/deg', 'mm per deg', 'mm per degree', 'mm per °'])
-export const inchPerDegree = unit('in/°', 25.4, ['in/deg', 'in per deg', 'in per degree', 'in per °', '"/°'])
+export const millimetrePerDegree = unit('mm/°', 1, ['mm/deg', 'mm per deg', 'mm per degree', 'mm per °'], { word: 'mm per degree' })
+export const inchPerDegree = unit('in/°', 25.4, ['in/deg', 'in per deg', 'in per degree', 'in per °', '"/°'], { word: 'inches per degree' })
 
 export const families = {
   angle: { name: 'an angle', units: [degree] },

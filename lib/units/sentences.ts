@@ -19,17 +19,21 @@ const sentenceOf: Record<NonNullable<QuantityError['hint']>, (typed: string) => 
   side: () => '',
 }
 
-/** "A number in mm, for example 86." */
+/** "a number in mm, for example 86" */
 function expected(kind: QuantityKind, system: UnitSystem): string {
   const { unit, example } = shownIn(kind, system)
-  return unit.word === '' ? `a number, for example ${example}` : `a number in ${unit.word}, for example ${example}`
+  const inUnit = unit.word === '' || unit.word.startsWith('per ') ? ` ${unit.word}`.trimEnd() : ` in ${unit.word}`
+  return `a number${inUnit}, for example ${example}`
 }
 
-/** "mm, cm, m, in or ft", or '' where nothing but a plain number is taken. */
-function unitsTaken(kind: QuantityKind): string {
-  const symbols = families[quantityOf(kind).family].units.map((unit) => unit.symbol).filter((symbol) => symbol !== '')
-  const last = symbols.at(-1) ?? ''
-  return symbols.length < 2 ? last : `${symbols.slice(0, -1).join(', ')} or ${last}`
+/** Which units a field takes, and what it makes of a number without one. */
+function takes(kind: QuantityKind, system: UnitSystem): string {
+  const { unit, example } = shownIn(kind, system)
+  const symbols = families[quantityOf(kind).family].units.map(({ symbol }) => symbol).filter((symbol) => symbol !== '')
+  const last = symbols.at(-1)
+  if (last === undefined) return `It takes a number without a unit, for example ${example}.`
+  const list = symbols.length === 1 ? last : `${symbols.slice(0, -1).join(', ')} or ${last}`
+  return unit.symbol === '' ? `It takes ${list} or no unit, for example ${example}.` : `It takes ${list}; without a unit, ${expected(kind, system)}.`
 }
 
 /** What was wrong with what was typed, what is expected, and an example. */
@@ -37,7 +41,6 @@ export function quantityErrorSentence(error: QuantityError, label: string, kind:
   const typed = quote(error.typed)
   const unit = quote(error.unit ?? '')
   const type = `Type ${expected(kind, system)}.`
-  const takes = unitsTaken(kind) === '' ? 'It takes a number without a unit' : `It takes ${unitsTaken(kind)}`
   switch (error.code) {
     case 'empty':
       return `${label} is empty. ${type}`
@@ -48,11 +51,11 @@ export function quantityErrorSentence(error: QuantityError, label: string, kind:
       return `${label}: ${typed} can be read as ${decimal} or as ${thousands}. Type the one you mean.`
     }
     case 'wrongQuantity':
-      return `${label}: ${unit} measures ${families[error.family ?? 'plain'].name}, which does not fit here. ${takes}; without a unit, ${expected(kind, system)}.`
+      return `${label}: ${unit} measures ${families[error.family ?? 'plain'].name}, which does not fit here. ${takes(kind, system)}`
     case 'unknownUnit':
       return error.hint === 'side'
         ? `${label}: leave out the words behind the angle in ${typed}. Before top dead centre is a plain number, after it a negative one, for example ${shownIn(kind, system).example}.`
-        : `${label}: ${unit} is not a unit known here. ${takes}; without a unit, ${expected(kind, system)}.`
+        : `${label}: ${unit} is not a unit known here. ${takes(kind, system)}`
   }
 }
 
