@@ -7,21 +7,20 @@ export type World = Cast & { orm: MikroORM }
 
 /** What a recipe knows of the call it prepares: who calls (null: signed out) and the row it is about. */
 type Call<T> = { actor: Actor, target: T, world: World }
-type Callable = (...args: never[]) => unknown
 
-type Recipe<F extends Callable, T> = {
+type Recipe<A extends unknown[], T> = {
   /** The action a caller's role must permit; 'public' for what works before sign-in. */
   needs: Action | 'public'
   /** The action that is enough for rows the caller wrote. Others' rows are then not found. */
   own?: Action
   /** Makes a fresh row of `world.shop`, written by `author`, and returns what the call needs to name it. Without it the call names no row. */
   prepare?: (world: World, author: Actor) => Promise<T>
-  /** The arguments of the call. `actor` is the caller; someone signed out gets the stranger here. */
-  args: (call: Call<T>) => Parameters<F>
+  /** Makes the call: `fn` is the declared function, `actor` the caller; someone signed out gets the stranger here. */
+  call: (fn: (...args: A) => unknown, call: Call<T>) => unknown
 }
 
 export type Declaration = {
-  of: Callable
+  of: (...args: never[]) => unknown
   needs: Action | 'public'
   own: Action | undefined
   namesRow: boolean
@@ -30,7 +29,7 @@ export type Declaration = {
 }
 
 /** One line of the table: a data function, a server action or a route handler, what it needs, and how to call it. */
-export function declare<F extends Callable, T = undefined>(of: F, { needs, own, prepare, args }: Recipe<F, T>): Declaration {
+export function declare<A extends unknown[], T = undefined>(of: (...args: A) => unknown, { needs, own, prepare, call }: Recipe<A, T>): Declaration {
   return {
     of,
     needs,
@@ -38,8 +37,16 @@ export function declare<F extends Callable, T = undefined>(of: F, { needs, own, 
     namesRow: prepare !== undefined,
     ready: async (world, actor, author) => {
       const target = prepare ? await prepare(world, author) : undefined as T
-      const list = args({ actor, target, world })
-      return () => of(...list)
+      return () => {
+        let calls = 0
+        const counted = (...args: A) => {
+          calls++
+          return of(...args)
+        }
+        const end = call(counted, { actor, target, world })
+        if (calls !== 1) throw new Error(`The recipe of ${of.name} calls it ${calls} times; it has to, once.`)
+        return end
+      }
     },
   }
 }

@@ -24,18 +24,18 @@ async function registered(): Promise<string> {
 }
 
 export const people = [
-  declare(createPersonWithShop, { needs: 'public', args: () => [newPerson(), anyAddress()] }),
-  declare(checkSignIn, { needs: 'public', prepare: registered, args: ({ target: email }) => [{ email, password }, anyAddress()] }),
-  declare(findActor, { needs: 'public', args: ({ actor }) => [actor.userId, null] }),
-  declare(getMe, { needs: 'person.readSelf', args: ({ actor }) => [actor] }),
-  declare(updateMyUnits, { needs: 'person.writeSelf', args: ({ actor }) => [actor, 'us'] }),
-  declare(updateSessionShop, { needs: 'shop.switch', prepare: async ({ shop }) => shop.id, args: ({ actor, target }) => [actor, randomUUID(), target] }),
+  declare(createPersonWithShop, { needs: 'public', call: (fn) => fn(newPerson(), anyAddress()) }),
+  declare(checkSignIn, { needs: 'public', prepare: registered, call: (fn, { target: email }) => fn({ email, password }, anyAddress()) }),
+  declare(findActor, { needs: 'public', call: (fn, { actor }) => fn(actor.userId, null) }),
+  declare(getMe, { needs: 'person.readSelf', call: (fn, { actor }) => fn(actor) }),
+  declare(updateMyUnits, { needs: 'person.writeSelf', call: (fn, { actor }) => fn(actor, 'us') }),
+  declare(updateSessionShop, { needs: 'shop.switch', prepare: async ({ shop }) => shop.id, call: (fn, { actor, target }) => fn(actor, randomUUID(), target) }),
 
-  declare(signUp, { needs: 'public', args: () => [{ ok: false }, formOf(newPerson())] }),
-  declare(signIn, { needs: 'public', prepare: registered, args: ({ target: email }) => [{ ok: false }, formOf({ email, password })] }),
-  declare(signOut, { needs: 'public', args: () => [] }),
-  declare(setUnitSystem, { needs: 'person.writeSelf', args: () => [formOf({ unitSystem: 'us' })] }),
-  declare(switchShop, { needs: 'shop.switch', prepare: async ({ shop }) => shop.id, args: ({ target: shopId }) => [formOf({ shopId })] }),
+  declare(signUp, { needs: 'public', call: (fn) => fn({ ok: false }, formOf(newPerson())) }),
+  declare(signIn, { needs: 'public', prepare: registered, call: (fn, { target: email }) => fn({ ok: false }, formOf({ email, password })) }),
+  declare(signOut, { needs: 'public', call: (fn) => fn() }),
+  declare(setUnitSystem, { needs: 'person.writeSelf', call: (fn) => fn(formOf({ unitSystem: 'us' })) }),
+  declare(switchShop, { needs: 'shop.switch', prepare: async ({ shop }) => shop.id, call: (fn, { target: shopId }) => fn(formOf({ shopId })) }),
 
-  declare(getMeRoute, { needs: 'person.readSelf', args: () => [] }),
+  declare(getMeRoute, { needs: 'person.readSelf', call: (fn) => fn() }),
 ]

@@ -3,5 +3,5 @@ import { formOf } from '../../support/next-mocks'
 import { declare } from '../declare'
 
 export const shell = [
-  declare(setTheme, { needs: 'public', args: () => [formOf({ theme: 'dark' })] }),
+  declare(setTheme, { needs: 'public', call: (fn) => fn(formOf({ theme: 'dark' })) }),
 ]
