@@ -8,7 +8,7 @@ import { searchPatterns } from './search-text'
 /** Rows of a page. */
 const pageSize = 50
 
-/** How a list is sorted: whole expressions with their direction, the id last; `from` reads a row's place in that order. */
+/** How a list is sorted: expressions over the table as `page`, the id last; `from` reads a row's place in that order. */
 export type Order<Row> = {
   columns: string[]
   direction: 'asc' | 'desc'
@@ -45,8 +45,8 @@ export const searchConditions = (column: string, typed: string): Condition[] =>
 
 /**
  * One page by key: the rows after the cursor's place in an order that ends in the id, so that none is lost or repeated however
- * many share a value. The rows are picked in a query of their own (`pick`: table with alias and columns) before anything is
- * joined to them (`complete`, with the picked rows as `page`).
+ * many share a value. The rows are picked in a query of their own (`pick`: columns and table, called page) before anything is
+ * joined to them (`complete`: from page).
  */
 export async function listPage<Row extends object>(em: EntityManager, list: {
   pick: string
@@ -66,7 +66,7 @@ export async function listPage<Row extends object>(em: EntityManager, list: {
   const by = order.columns.map((column) => `${column} ${order.direction}`).join(', ')
   const sql = `with page as materialized (
     ${list.pick} where ${where.map((condition) => condition.sql).join(' and ')} order by ${by} limit ${pageSize + 1}
-  ) ${list.complete}`
+  ) ${list.complete} order by ${by}`
   const found = await em.execute<Row[]>(sql, where.flatMap((condition) => condition.values ?? []))
   const rows = found.slice(0, pageSize)
   const last = rows.at(-1)

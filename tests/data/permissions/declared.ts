@@ -14,10 +14,16 @@
  * and that no refused call changed a row.
  */
 import type { Declaration } from './declare'
+import { engines } from './declared/engines'
 import { people } from './declared/people'
+import { plans } from './declared/plans'
+import { scenarios } from './declared/scenarios'
 import { shell } from './declared/shell'
 
 export const declared: readonly Declaration[] = [
+  ...engines,
+  ...scenarios,
+  ...plans,
   ...people,
   ...shell,
 ]

@@ -1,0 +1,22 @@
+import { GET as listPlansRoute } from '@/app/api/plans/route'
+import type { Actor } from '@/lib/auth/actor'
+import { getPlan } from '@/lib/data/plans/get-plan'
+import { listPlans } from '@/lib/data/plans/list-plans'
+import { releaseRevision } from '@/lib/data/plans/release-revision'
+import { aScenario } from '../../support/records'
+import { declare, type World } from '../declare'
+
+const draft = async (world: World, author: Actor) => (await aScenario(author, world.author)).id
+const released = async (world: World, author: Actor) => {
+  const id = await draft(world, author)
+  await releaseRevision(world.author, id, 1, {})
+  return id
+}
+
+export const plans = [
+  declare(releaseRevision, { needs: 'plan.release', prepare: draft, args: ({ actor, target }) => [actor, target, 1, {}] }),
+  declare(getPlan, { needs: 'plan.read', prepare: released, args: ({ actor, target }) => [actor, target, 1] }),
+  declare(listPlans, { needs: 'plan.read', args: ({ actor }) => [actor, {}] }),
+
+  declare(listPlansRoute, { needs: 'plan.read', args: () => [new Request('http://127.0.0.1/api/plans')] }),
+]

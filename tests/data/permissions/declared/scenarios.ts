@@ -1,0 +1,42 @@
+import { GET as listRevisionsRoute } from '@/app/api/scenarios/[id]/revisions/route'
+import { GET as listScenariosRoute } from '@/app/api/scenarios/route'
+import type { Actor } from '@/lib/auth/actor'
+import { archiveScenario, restoreScenario } from '@/lib/data/scenarios/archive-scenario'
+import { createScenario } from '@/lib/data/scenarios/create-scenario'
+import { duplicateScenario } from '@/lib/data/scenarios/duplicate-scenario'
+import { evaluateForActor } from '@/lib/data/scenarios/evaluate-for-actor'
+import { getRevision } from '@/lib/data/scenarios/get-revision'
+import { getScenario } from '@/lib/data/scenarios/get-scenario'
+import { listRevisions } from '@/lib/data/scenarios/list-revisions'
+import { listScenarios } from '@/lib/data/scenarios/list-scenarios'
+import { saveScenario } from '@/lib/data/scenarios/save-scenario'
+import { aScenario, anEngine, sheet } from '../../support/records'
+import { declare, type World } from '../declare'
+
+const engine = async ({ author }: World) => (await anEngine(author)).id
+const prepare = async (world: World, author: Actor) => (await aScenario(author, world.author)).id
+const byId = ({ actor, target }: { actor: Actor, target: string }): [Actor, string] => [actor, target]
+
+export const scenarios = [
+  declare(listScenarios, { needs: 'scenario.read', own: 'scenario.readOwn', args: ({ actor }) => [actor, {}] }),
+  declare(getScenario, { needs: 'scenario.read', own: 'scenario.readOwn', prepare, args: byId }),
+  declare(listRevisions, { needs: 'scenario.read', own: 'scenario.readOwn', prepare, args: byId }),
+  declare(getRevision, { needs: 'scenario.read', own: 'scenario.readOwn', prepare, args: ({ actor, target }) => [actor, target, 1] }),
+  declare(createScenario, {
+    needs: 'scenario.create', prepare: engine, args: ({ actor, target: engineId }) => [actor, { engineId, engineVersion: 1, title: 'New', sheet: sheet() }],
+  }),
+  declare(evaluateForActor, { needs: 'scenario.create', prepare: engine, args: ({ actor, target: engineId }) => [actor, { engineId, sheet: sheet() }] }),
+  declare(saveScenario, {
+    needs: 'scenario.write', own: 'scenario.writeOwn', prepare,
+    args: ({ actor, target }) => [actor, target, { baseRevision: 1, engineVersion: 1, title: 'Changed', sheet: sheet() }],
+  }),
+  declare(duplicateScenario, { needs: 'scenario.read', own: 'scenario.readOwn', prepare, args: byId }),
+  declare(archiveScenario, { needs: 'scenario.archive', own: 'scenario.archiveOwn', prepare, args: byId }),
+  declare(restoreScenario, { needs: 'scenario.archive', own: 'scenario.archiveOwn', prepare, args: byId }),
+
+  declare(listScenariosRoute, { needs: 'scenario.read', own: 'scenario.readOwn', args: () => [new Request('http://127.0.0.1/api/scenarios?sort=title')] }),
+  declare(listRevisionsRoute, {
+    needs: 'scenario.read', own: 'scenario.readOwn', prepare,
+    args: ({ target: id }) => [new Request(`http://127.0.0.1/api/scenarios/${id}/revisions`), { params: Promise.resolve({ id }) }],
+  }),
+]
