@@ -9,6 +9,8 @@ const config = {
   poweredByHeader: false,
   turbopack: { root },
   experimental: {
+    // forbidden() and its page: a role that may not open a page is told so, with 403.
+    authInterrupts: true,
     // A larger body is refused by proxy.ts with a sentence; this is the second wall behind it.
     serverActions: { bodySizeLimit: '1mb' },
   },
