@@ -30,8 +30,8 @@ export function stripGeometry({ value, atLeast, atMost, width, deviation = false
   const high = Math.max(...limits)
   const centre = (low + high) / 2
   const away = value === null ? 0 : Math.abs(value - centre)
-  // With one limit its own size sets the scale, so that small steps near it stay visible.
-  const reach = Math.max(high > low ? high - low : Math.abs(low) / 2, away * 1.2) || 1
+  // One limit: from nothing to twice the limit. A value further out widens the strip.
+  const reach = Math.max(high > low ? high - low : Math.abs(low), away * 1.2) || 1
   const side = deviation ? -1 : 1
   const at = (v: number) => (from + to) / 2 + side * ((v - centre) / reach) * (to - from) / 2
   const keep = (x: number) => Math.min(to - markerRoom, Math.max(from + markerRoom, x))
