@@ -3,14 +3,14 @@ import { formatInput, type UnitSystem } from '../units'
 import { channelToForm, isScheduleKind, numbersOfChannel, readChannel } from './channel-form'
 import { fieldIndex, type FieldErrors, type FormValues } from './field'
 import { fieldReader, placeIssues } from './read-fields'
-import { scenarioSheet, scenarioTitle } from './scenario'
+import { scenarioSheet, scenarioTitle, type CheckedSheet } from './scenario'
 import { maxPitches, scenarioFields, type ChannelPrefix } from './scenario-fields'
 
 const index = fieldIndex(scenarioFields)
 
 export interface ScenarioInput {
   title: string
-  sheet: ScenarioSheet
+  sheet: CheckedSheet
 }
 
 export type ScenarioFormResult = { ok: true; input: ScenarioInput } | { ok: false; errors: FieldErrors }

@@ -86,6 +86,9 @@ export const scenarioSheet = z.object({
   notes: z.string().max(4000, 'The notes are longer than 4000 characters.'),
 }) satisfies z.ZodType<ScenarioSheet>
 
+/** A sheet that passed the schema. */
+export type CheckedSheet = z.infer<typeof scenarioSheet>
+
 export const scenarioTitle = z.string().trim().min(1, 'Give the scenario a name.').max(120, 'The name is longer than 120 characters.')
 
 /** Version of the stored sheet; a reader of an older one migrates it. */

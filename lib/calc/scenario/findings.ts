@@ -40,7 +40,7 @@ function crankingDraft(scenario: Scenario, channel: ChannelName): Draft {
   return {
     limitId: 'crankingAdvanceDeg', channel, value: worst.deg,
     data: { rpm: worst.rpm, released: worst.released, slowestRpm: crankingSlowestRpm, fastestRpm: crankingFastestRpm },
-    inputs: [...scheduleInputs(channel), `sheet.${channel}.crankRetard`, 'engine.crankingSlowestRpm', 'engine.crankingFastestRpm'],
+    inputs: [...scheduleInputs(channel), `sheet.${channel}.crankRetard.byDeg`, 'engine.crankingSlowestRpm', 'engine.crankingFastestRpm'],
     sourceIds: ['trade'], method: 'spark-advance',
   }
 }
@@ -50,7 +50,7 @@ function retardDrafts({ engine, sheet }: Scenario, channel: ChannelName): Draft[
   const retard = sheet[channel].crankRetard
   if (!retard || retard.byDeg === 0) return []
   const hysteresisRpm = retard.hysteresisRpm ?? 0
-  const shared = { channel, inputs: [`sheet.${channel}.crankRetard`], sourceIds: ['trade'], method: 'spark-advance' }
+  const shared = { channel, inputs: [`sheet.${channel}.crankRetard.belowRpm`], sourceIds: ['trade'], method: 'spark-advance' }
   return [
     {
       ...shared, limitId: 'retardAboveCrankingRpm', value: retard.belowRpm - hysteresisRpm - engine.crankingFastestRpm,
@@ -70,7 +70,7 @@ function beyondMbtDraft({ sheet }: Scenario, channel: ChannelName, curve: CurveP
   return {
     limitId: 'beyondMbtDeg', channel, value: worst.deg - sheet.mbt.deg,
     data: { rpm: worst.rpm, deg: worst.deg, mbtDeg: sheet.mbt.deg, provenance: sheet.mbt.provenance },
-    inputs: [...scheduleInputs(channel), 'sheet.mbt'], sourceIds: ['heywood-1988', 'crossley-cook-1991'], method: 'timing-torque',
+    inputs: [...scheduleInputs(channel), 'sheet.mbt.deg'], sourceIds: ['heywood-1988', 'crossley-cook-1991'], method: 'timing-torque',
   }
 }
 
@@ -83,7 +83,7 @@ function backupFirstDraft(scenario: Scenario): Draft {
   const smallest = reports.reduce((least, point) => (point.staggerDeg < least.staggerDeg - 1e-12 ? point : least))
   return {
     limitId: 'backupFirstDeg', channel: null, value: smallest.staggerDeg, data: { rpm: smallest.rpm, staggerMs: smallest.staggerMs },
-    inputs: ['sheet.primary', 'sheet.backup'], sourceIds: ['trade'], method: 'stagger',
+    inputs: ['sheet.primary.schedule', 'sheet.backup.schedule'], sourceIds: ['trade'], method: 'stagger',
   }
 }
 
@@ -92,7 +92,7 @@ function proofDraft(scenario: Scenario, channel: ChannelName, proof: { rpm: PerC
   return {
     limitId: 'proofAboveIdleRpm', channel, value: proof.rpm[channel], limit: engine.idleRpm + limits.proofAboveIdleRpm.value,
     data: { idleRpm: engine.idleRpm, maxRpm: engine.maxRpm, toleranceDeg: proof.toleranceDeg, followsPressure: dependsOnPressure(sheet[channel]) },
-    inputs: [...scheduleInputs(channel), `sheet.${channel}.crankRetard`, 'sheet.tolerances', 'engine.idleRpm'], sourceIds: ['trade'], method: 'proof-speed',
+    inputs: [...scheduleInputs(channel), `sheet.${channel}.crankRetard.belowRpm`, 'sheet.tolerances.timingCheckDeg', 'engine.idleRpm'], sourceIds: ['trade'], method: 'proof-speed',
   }
 }
 
@@ -112,13 +112,13 @@ function drafts(scenario: Scenario, parts: ScenarioParts, limits: Limits): Draft
   if (power.ok) add(() => ({
     limitId: 'backupPowerRatio', channel: 'backup', value: power.backupToPrimary,
     data: { rpm: engine.maxRpm, primaryKw: power.atMax.primaryKw, backupKw: power.atMax.backupKw, shortOfMbtDeg: power.shortOfMbtDeg.backup },
-    inputs: ['sheet.primary', 'sheet.backup', 'sheet.mbt'], sourceIds: ['heywood-1988', 'crossley-cook-1991', 'trade'], method: 'timing-torque',
+    inputs: ['sheet.backup.schedule', 'sheet.mbt.deg'], sourceIds: ['heywood-1988', 'crossley-cook-1991', 'trade'], method: 'timing-torque',
   }))
   if (proof.ok) for (const channel of channelNames) add(() => proofDraft(scenario, channel, proof, limits))
   if (register.ok) for (const channel of channelNames) {
     const { rpm, registerDeg, freeDeg, endOffsetDeg } = register.worst[channel]
     const phasedAtDeg = channel === 'backup' && sheet.distribution === 'capEach' ? sheet.rotor.backupPhasedAtDeg : sheet.rotor.phasedAtDeg
-    const shared = { channel, data: { rpm, endOffsetDeg, phasedAtDeg, bestPhasingDeg: register.bestPhasingDeg[channel], sparkDurationMs: sheet.rotor.sparkDurationMs }, inputs: ['sheet.rotor', `sheet.${channel}`], sourceIds: ['trade'], method: 'rotor-register' }
+    const shared = { channel, data: { rpm, endOffsetDeg, phasedAtDeg, bestPhasingDeg: register.bestPhasingDeg[channel], sparkDurationMs: sheet.rotor.sparkDurationMs }, inputs: [channel === 'backup' && sheet.distribution === 'capEach' ? 'sheet.rotor.backupPhasedAtDeg' : 'sheet.rotor.phasedAtDeg'], sourceIds: ['trade'], method: 'rotor-register' }
     add(() => [{ ...shared, limitId: 'registerDeg', value: registerDeg }, { ...shared, limitId: 'freeDeg', value: freeDeg }])
   }
   if (leads.ok) add(() => ({
@@ -139,8 +139,12 @@ const rank: Record<Verdict, number> = { outside: 0, close: 1, within: 2 }
 const roomOf = ({ value, limit, sense, closeBand }: Finding) =>
   value === null ? -Infinity : (sense === 'atMost' ? limit - value : value - limit) / (closeBand || 1)
 
+/** Outside, close, within; the least room first in each. */
+export const rankFindings = (findings: readonly Finding[]): Finding[] =>
+  [...findings].sort((left, right) => rank[left.verdict] - rank[right.verdict] || roomOf(left) - roomOf(right) || left.id.localeCompare(right.id))
+
 export function findingsOf(scenario: Scenario, parts: ScenarioParts, limits: Limits): Finding[] {
-  return drafts(scenario, parts, limits).map(({ limit: relative, ...draft }): Finding => {
+  return rankFindings(drafts(scenario, parts, limits).map(({ limit: relative, ...draft }): Finding => {
     const { sense, value, closeBand, unit } = limits[draft.limitId]
     const limit = relative ?? value
     return {
@@ -148,5 +152,5 @@ export function findingsOf(scenario: Scenario, parts: ScenarioParts, limits: Lim
       id: draft.channel ? `${draft.limitId}.${draft.channel}` : draft.limitId,
       verdict: judge(draft.value, { sense, value: limit, closeBand }),
     }
-  }).sort((left, right) => rank[left.verdict] - rank[right.verdict] || roomOf(left) - roomOf(right))
+  }))
 }

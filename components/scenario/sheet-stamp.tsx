@@ -1,0 +1,32 @@
+'use client'
+
+import { memo } from 'react'
+import { ChannelChip } from '@/components/ui/channel-chip'
+import { Stamp } from '@/components/ui/stamp'
+import type { ScenarioResult } from '@/lib/calc/scenario/result-types'
+import type { UnitSystem } from '@/lib/units'
+import { findingTitle, findingValue, headLine, letterOf, limitWords } from '@/lib/words/findings'
+
+interface SheetStampProps {
+  result: Pick<ScenarioResult, 'counts' | 'findings'>
+  system: UnitSystem
+  stale: boolean
+}
+
+/** The count of findings, with the worst one named. Never an approval. */
+export const SheetStamp = memo(function SheetStamp({ result: { counts, findings }, system, stale }: SheetStampProps) {
+  const worst = findings[0]
+  const verdict = counts.outside > 0 ? 'outside' : counts.close > 0 ? 'close' : counts.within > 0 ? 'within' : 'notJudged'
+  const value = worst ? findingValue(worst, system) : null
+  return (
+    <Stamp verdict={verdict} head={headLine(counts)} live>
+      {worst && worst.verdict !== 'within' ? (
+        <>
+          {worst.channel ? <><ChannelChip channel={letterOf(worst.channel)} /> </> : null}
+          {findingTitle(worst, system)}{value ? <>: <b className={worst.verdict === 'outside' ? 'one bad' : 'one'}>{value.text}{value.unit === '°' ? '°' : value.unit ? ` ${value.unit}` : ''}</b></> : null}; {limitWords(worst, system)}.
+        </>
+      ) : stale ? null : 'By the limits named beside each finding.'}
+      {stale ? ' An input cannot be read: some figures are the last valid ones.' : null}
+    </Stamp>
+  )
+})

@@ -1,0 +1,112 @@
+import type { Limits } from '../calc/limits'
+import { partsStandingOn } from '../calc/scenario/dependencies'
+import { evaluateScenario } from '../calc/scenario/evaluate-scenario'
+import { rankFindings } from '../calc/scenario/findings'
+import type { Finding, Part, PartError, PartName, ScenarioParts, ScenarioResult } from '../calc/scenario/result-types'
+import type { Engine, ScenarioSheet } from '../calc/scenario/scenario-types'
+import { fieldIndex, type FieldErrors, type FormValues } from '../schemas/field'
+import { fieldOfScenarioPath, formToScenario } from '../schemas/scenario-form'
+import { scenarioFields } from '../schemas/scenario-fields'
+import type { UnitSystem } from '../units'
+
+/** What an evaluation stands on besides the typed texts. */
+export interface LiveContext {
+  engine: Engine
+  limits: Limits
+  system: UnitSystem
+  /** The sheet the form was filled from: untouched fields keep its exact values. */
+  base: ScenarioSheet
+}
+
+export interface LiveState {
+  values: FormValues
+  /** The last texts that could be computed with. */
+  lastValid: FormValues
+  sheet: ScenarioSheet
+  /** Newest figures of each part; a part that cannot be computed now keeps its last ones. */
+  result: ScenarioResult
+  errors: FieldErrors
+  /** Character index of the fault in a formula, by field name. */
+  faultAt: Record<string, number>
+  /** Parts whose figures are the last valid ones. */
+  stale: ReadonlySet<PartName>
+  staleFindings: ReadonlySet<string>
+  /** The formula parser is wanted and not there yet. */
+  wantsParser: boolean
+}
+
+const index = fieldIndex(scenarioFields)
+
+/** A schedule kind just chosen has nothing to fall back on: then the whole schedule is the last valid one. */
+function withLastValid(values: FormValues, lastValid: FormValues, errors: FieldErrors): FormValues {
+  const patched = { ...values }
+  for (const name of Object.keys(errors)) {
+    const path = index.get(name)?.path ?? ''
+    if (path.endsWith('.schedule')) {
+      for (const field of scenarioFields) if (field.path === path) patched[field.name] = lastValid[field.name] ?? ''
+    } else patched[name] = lastValid[name] ?? ''
+  }
+  return patched
+}
+
+/** Something typed that cannot be computed with, to be said at its field. */
+const isTyped = (error: PartError) => error.code === 'input' || error.code === 'runUpOutside'
+const isWaiting = (error: PartError) => isTyped(error) || error.code === 'formulaParserNotLoaded'
+
+/** Figures of a failed part stay the last valid ones, unless it is withheld for a reason that is no fault of the typing. */
+function keepParts(fresh: ScenarioParts, last: ScenarioParts): { parts: ScenarioParts; kept: PartName[]; errors: PartError[] } {
+  const parts: Record<string, Part<object>> = { ...fresh }
+  const kept: PartName[] = []
+  const errors: PartError[] = []
+  for (const name of Object.keys(fresh) as PartName[]) {
+    const now = fresh[name]
+    if (now.ok || !isWaiting(now.error)) continue
+    errors.push(now.error)
+    if (!last[name].ok) continue
+    parts[name] = last[name]
+    kept.push(name)
+  }
+  return { parts: parts as unknown as ScenarioParts, kept, errors }
+}
+
+function keepFindings(fresh: Finding[], last: Finding[], isPartMissing: boolean): { findings: Finding[]; kept: string[] } {
+  if (!isPartMissing) return { findings: fresh, kept: [] }
+  const now = new Set(fresh.map((finding) => finding.id))
+  const kept = last.filter((finding) => !now.has(finding.id))
+  return { findings: rankFindings([...fresh, ...kept]), kept: kept.map((finding) => finding.id) }
+}
+
+/** The state a page opens with: computed on the server, so that it stands there without a script. */
+export const startLive = (values: FormValues, sheet: ScenarioSheet, result: ScenarioResult): LiveState =>
+  ({ values, lastValid: values, sheet, result, errors: {}, faultAt: {}, stale: new Set(), staleFindings: new Set(), wantsParser: false })
+
+/** One edit: reads the texts, computes what can be computed, keeps the last valid figures of the rest and says which they are. */
+export function editLive(state: LiveState, changes: FormValues, context: LiveContext): LiveState {
+  const values = { ...state.values, ...changes }
+  const read = formToScenario(values, context.system, context.base)
+  const errors: FieldErrors = read.ok ? {} : { ...read.errors }
+  const patched = read.ok ? values : withLastValid(values, state.lastValid, read.errors)
+  const usable = read.ok ? read : formToScenario(patched, context.system, context.base)
+  const sheet = usable.ok ? usable.input.sheet : state.sheet
+  const fresh = evaluateScenario({ engine: context.engine, sheet }, context.limits)
+  const { parts, kept, errors: partErrors } = keepParts(fresh.parts, state.result.parts)
+  const faultAt: Record<string, number> = {}
+  for (const error of partErrors) {
+    if (!isTyped(error)) continue
+    const name = fieldOfScenarioPath(error.field, values)
+    errors[name] ??= error.message
+    if (error.at !== undefined) faultAt[name] = error.at
+  }
+  const paths = Object.keys(errors).map((name) => index.get(name)?.path ?? name)
+  const { findings, kept: keptFindings } = keepFindings(fresh.findings, state.result.findings, partErrors.length > 0)
+  const drivenByFault = findings.filter((finding) => finding.inputs.some((input) => paths.some((path) => `${input}.`.startsWith(`sheet.${path}.`) || `sheet.${path}.`.startsWith(`${input}.`))))
+  const count = (verdict: Finding['verdict']) => findings.filter((finding) => finding.verdict === verdict).length
+  return {
+    values, errors, faultAt, sheet,
+    lastValid: usable.ok && partErrors.length === 0 ? patched : state.lastValid,
+    result: { ...fresh, parts, findings, counts: { outside: count('outside'), close: count('close'), within: count('within') } },
+    stale: new Set([...kept, ...(paths.length > 0 ? partsStandingOn(paths) : [])]),
+    staleFindings: new Set([...keptFindings, ...drivenByFault.map((finding) => finding.id)]),
+    wantsParser: partErrors.some((error) => error.code === 'formulaParserNotLoaded'),
+  }
+}
