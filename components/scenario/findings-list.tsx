@@ -13,7 +13,7 @@ import { findingSentence, findingTitle, findingValue, limitOrigin, limitWords, l
 import { sourceWords } from '@/lib/words/sources'
 import type { UnitSystem } from '@/lib/units'
 
-const verdictClass = { outside: 'out', close: 'close', within: '' } as const
+const verdictClass = { outside: 'outside', close: 'close', within: '' } as const
 
 /** One finding: mark, name, value, limit, strip, why and from where. */
 export const FindingRow = memo(function FindingRow({ finding, system, stale, reason }: { finding: Finding, system: UnitSystem, stale: boolean, reason?: string }) {
