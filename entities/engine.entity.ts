@@ -28,7 +28,7 @@ export const Engine = defineEntity({
     // J260 and j260 would number their scenarios alike.
     { name: 'engines_shop_code_unique', expression: 'create unique index "engines_shop_code_unique" on "engines" ("shop_id", lower("code"))' },
     { name: 'engines_shop_updated_index', expression: 'create index "engines_shop_updated_index" on "engines" ("shop_id", "updated_at" desc, "id" desc)' },
-    { name: 'engines_search_index', expression: 'create index "engines_search_index" on "engines" using gin ("search" gin_trgm_ops)' },
+    { name: 'engines_search_index', expression: 'create index "engines_search_index" on "engines" using gin ("search" gin_trgm_ops) with (fastupdate = off)' },
     { name: 'engines_created_by_index', properties: ['createdBy'] },
   ],
 })

@@ -43,7 +43,7 @@ export const Revision = defineEntity({
   uniques: [{ name: 'revisions_scenario_number_unique', properties: ['scenario', 'number'] }],
   indexes: [
     { name: 'revisions_released_index', expression: 'create index "revisions_released_index" on "revisions" ("shop_id", "released_at" desc, "id" desc) where "released_at" is not null' },
-    { name: 'revisions_search_index', expression: 'create index "revisions_search_index" on "revisions" using gin ("search" gin_trgm_ops) where "released_at" is not null' },
+    { name: 'revisions_search_index', expression: 'create index "revisions_search_index" on "revisions" using gin ("search" gin_trgm_ops) with (fastupdate = off) where "released_at" is not null' },
     { name: 'revisions_author_index', properties: ['author'] },
   ],
 })

@@ -4,10 +4,8 @@ import { Shop } from './shop.entity'
 import { User } from './user.entity'
 
 // One index for each order of the list. Each ends in the id, so that a page can begin after any row, equal values included.
-const ordered = (name: string, columns: string, archived: 'active' | 'archived' = 'active') => ({
-  name: `scenarios_${name}_index`,
-  expression: `create index "scenarios_${name}_index" on "scenarios" (${columns}) where "archived_at" is ${archived === 'active' ? 'null' : 'not null'}`,
-})
+const ordered = (name: string, columns: string, where = '"archived_at" is null') =>
+  ({ name: `scenarios_${name}_index`, expression: `create index "scenarios_${name}_index" on "scenarios" (${columns}) where ${where}` })
 
 /**
  * The working sheet: a row to find and lock; what was typed and computed stands in its revisions. The counts are those of
@@ -47,9 +45,11 @@ export const Scenario = defineEntity({
     ordered('outside', '"shop_id", "outside_count" desc, "updated_at" desc, "id" desc'),
     ordered('owner', '"owner_id", "shop_id", "updated_at" desc, "id" desc'),
     ordered('engine', '"engine_id", "shop_id", "updated_at" desc, "id" desc'),
-    ordered('archived', '"shop_id", "updated_at" desc, "id" desc', 'archived'),
+    ordered('archived', '"shop_id", "updated_at" desc, "id" desc', '"archived_at" is not null'),
+    ordered('released', '"shop_id", "updated_at" desc, "id" desc', '"archived_at" is null and "released_revision" is not null'),
     { name: 'scenarios_engine_id_index', properties: ['engine'] },
-    { name: 'scenarios_search_index', expression: 'create index "scenarios_search_index" on "scenarios" using gin ("search" gin_trgm_ops)' },
+    // No pending list: many new rows in it would make the planner read the table instead.
+    { name: 'scenarios_search_index', expression: 'create index "scenarios_search_index" on "scenarios" using gin ("search" gin_trgm_ops) with (fastupdate = off)' },
   ],
 })
 export type Scenario = InferEntity<typeof Scenario>

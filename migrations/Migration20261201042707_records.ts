@@ -39,7 +39,7 @@ export class Migration20261201042707_records extends Migration {
     this.addSql(`create table "engines" ("id" uuid not null default gen_random_uuid(), "shop_id" uuid not null, "name" varchar(80) not null, "code" varchar(12) not null, "spec" jsonb not null, "version" int not null default 1, "last_scenario_number" int not null default 0, "archived_at" timestamptz(3) null, "created_by_id" uuid not null, "created_at" timestamptz(3) not null default now(), "updated_at" timestamptz(3) not null default now(), "search" text not null, constraint "engines_pkey" primary key ("id"));`)
     this.addSql(`create unique index "engines_shop_code_unique" on "engines" ("shop_id", lower("code"));`)
     this.addSql(`create index "engines_shop_updated_index" on "engines" ("shop_id", "updated_at" desc, "id" desc);`)
-    this.addSql(`create index "engines_search_index" on "engines" using gin ("search" gin_trgm_ops);`)
+    this.addSql(`create index "engines_search_index" on "engines" using gin ("search" gin_trgm_ops) with (fastupdate = off);`)
     this.addSql(`create index "engines_created_by_index" on "engines" ("created_by_id");`)
 
     this.addSql(`create table "scenarios" ("id" uuid not null default gen_random_uuid(), "shop_id" uuid not null, "engine_id" uuid not null, "code" varchar(24) not null, "title" varchar(120) not null, "owner_id" uuid not null, "current_revision" int not null, "outside_count" int not null, "close_count" int not null, "within_count" int not null, "released_revision" int null, "archived_at" timestamptz(3) null, "created_at" timestamptz(3) not null default now(), "updated_at" timestamptz(3) not null default now(), "version" int not null default 1, "search" text not null, constraint "scenarios_pkey" primary key ("id"));`)
@@ -50,13 +50,14 @@ export class Migration20261201042707_records extends Migration {
     this.addSql(`create index "scenarios_owner_index" on "scenarios" ("owner_id", "shop_id", "updated_at" desc, "id" desc) where "archived_at" is null;`)
     this.addSql(`create index "scenarios_engine_index" on "scenarios" ("engine_id", "shop_id", "updated_at" desc, "id" desc) where "archived_at" is null;`)
     this.addSql(`create index "scenarios_archived_index" on "scenarios" ("shop_id", "updated_at" desc, "id" desc) where "archived_at" is not null;`)
+    this.addSql(`create index "scenarios_released_index" on "scenarios" ("shop_id", "updated_at" desc, "id" desc) where "archived_at" is null and "released_revision" is not null;`)
     this.addSql(`create index "scenarios_engine_id_index" on "scenarios" ("engine_id");`)
-    this.addSql(`create index "scenarios_search_index" on "scenarios" using gin ("search" gin_trgm_ops);`)
+    this.addSql(`create index "scenarios_search_index" on "scenarios" using gin ("search" gin_trgm_ops) with (fastupdate = off);`)
     this.addSql(`alter table "scenarios" add constraint "scenarios_shop_code_unique" unique ("shop_id", "code");`)
 
     this.addSql(`create table "revisions" ("id" uuid not null default gen_random_uuid(), "scenario_id" uuid not null, "shop_id" uuid not null, "number" int not null, "title" varchar(120) not null, "sheet" jsonb not null, "sheet_version" int not null, "engine_version" int not null, "engine" jsonb not null, "results" jsonb not null, "outside_count" int not null, "close_count" int not null, "within_count" int not null, "limits" jsonb not null, "calc_version" varchar(32) not null, "author_id" uuid not null, "created_at" timestamptz(3) not null default now(), "released_at" timestamptz(3) null, "released_by_id" uuid null, "release_reasons" jsonb null, "search" text not null, constraint "revisions_pkey" primary key ("id"));`)
     this.addSql(`create index "revisions_released_index" on "revisions" ("shop_id", "released_at" desc, "id" desc) where "released_at" is not null;`)
-    this.addSql(`create index "revisions_search_index" on "revisions" using gin ("search" gin_trgm_ops) where "released_at" is not null;`)
+    this.addSql(`create index "revisions_search_index" on "revisions" using gin ("search" gin_trgm_ops) with (fastupdate = off) where "released_at" is not null;`)
     this.addSql(`create index "revisions_author_index" on "revisions" ("author_id");`)
     this.addSql(`alter table "revisions" add constraint "revisions_scenario_number_unique" unique ("scenario_id", "number");`)
 

@@ -63,11 +63,9 @@ export function addScenario(em: EntityManager, actor: Actor, engine: Engine, tit
 
 /** Everything a page shows of a scenario, with its current revision. */
 export async function toScenarioDto(em: EntityManager, actor: Actor, role: Role, scenario: Scenario): Promise<ScenarioDto> {
-  const [engine, revision, owner] = await Promise.all([
-    em.findOneOrFail(Engine, { id: scenario.engine.id, shop: actor.shop.id }),
-    findRevision(em, scenario, scenario.currentRevision),
-    em.findOneOrFail(User, scenario.owner.id, { fields: ['name'] }),
-  ])
+  const engine = await em.findOneOrFail(Engine, { id: scenario.engine.id, shop: actor.shop.id })
+  const revision = await findRevision(em, scenario, scenario.currentRevision)
+  const owner = await em.findOneOrFail(User, scenario.owner.id, { fields: ['name'] })
   const archived = Boolean(scenario.archivedAt)
   const writes = can({ role }, 'scenario.write') || (can({ role }, 'scenario.writeOwn') && scenario.owner.id === actor.userId)
   return toDto(scenarioDto, {
