@@ -4,7 +4,7 @@ import { lastLines, stepSentence } from './failed-step.mjs'
 import { Failure } from './failure.mjs'
 import { inRoot } from './paths.mjs'
 
-/** @typedef {ReturnType<typeof import('./pg-cluster.mjs').cluster>} Cluster */
+/** @typedef {import('./pg-cluster.mjs').Cluster} Cluster */
 
 /** The migrations of this checkout, oldest first. */
 const ownMigrations = () =>

@@ -11,6 +11,8 @@ import { farFolder } from './pg-place.mjs'
 import { postmasterOf, serverProcesses } from './pg-processes.mjs'
 import { runSql } from './pg-programs-for.mjs'
 
+/** @typedef {ReturnType<typeof cluster>} Cluster */
+
 /**
  * A private PostgreSQL cluster of this checkout: loopback only, no unix socket, password by scram, a free port.
  * @param {import('./pg-info.mjs').ClusterName} name

@@ -37,9 +37,10 @@ function makeReachable(folder) {
     if (runAs(owner, 'test', ['-w', folder, '-a', '-x', folder]).ok) return true
   } catch (error) {
     if (error instanceof Failure) throw error
-    const code = /** @type {NodeJS.ErrnoException} */ (error).code
+    const refused = /** @type {NodeJS.ErrnoException} */ (error)
     // A disk that knows no owners (a network or host mount) refuses chown: the other folder may do.
-    if (!isRoot || !['EPERM', 'EACCES', 'EINVAL', 'ENOTSUP', 'EROFS'].includes(code ?? '')) throw new Failure(fileSentence(/** @type {Error} */ (error), folder) ?? `${folder} cannot be made: ${/** @type {Error} */ (error).message}.`)
+    if (!isRoot || !['EPERM', 'EACCES', 'EINVAL', 'ENOTSUP', 'EROFS'].includes(refused.code ?? ''))
+      throw new Failure(fileSentence(refused, folder) ?? `${folder} cannot be made: ${refused.message}.`)
   }
   fs.rmSync(folder, { recursive: true, force: true })
   return false

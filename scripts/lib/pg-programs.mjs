@@ -1,6 +1,7 @@
 import { spawnSync } from 'node:child_process'
 import fs from 'node:fs'
 import path from 'node:path'
+import { Failure } from './failure.mjs'
 
 /** Where Debian keeps the server programs, one folder a major version; they are not on the PATH. */
 const DEBIAN_HOME = '/usr/lib/postgresql'
@@ -48,16 +49,19 @@ export function ownerFor(folder) {
 }
 
 /**
- * Runs a program to its end as the given user. The working folder is / because that user may not be able to enter ours.
+ * Runs a program to its end as the given user. The working folder is / because that user may not be able to enter ours,
+ * and the group is its own because a Ctrl-C meant for the command must not end a pg_ctl in the middle.
  * @param {{ uid: number, gid: number } | undefined} owner
  * @param {string} program
  * @param {string[]} args
  * @param {Record<string, string>} [env]
  */
 export function runAs(owner, program, args, env = {}) {
-  const result = spawnSync(program, args, {
-    cwd: '/', encoding: 'utf8', stdio: ['ignore', 'pipe', 'pipe'], env: { ...process.env, LC_ALL: 'C.UTF-8', ...env }, ...owner,
-  })
+  const result = spawnSync(program, args, /** @type {import('node:child_process').SpawnSyncOptionsWithStringEncoding} */ ({
+    cwd: '/', detached: true, encoding: 'utf8', stdio: ['ignore', 'pipe', 'pipe'], env: { ...process.env, LC_ALL: 'C.UTF-8', ...env }, ...owner,
+  }))
   if (result.error) throw result.error
+  // Half an answer would read as “no server runs here”.
+  if (result.signal) throw new Failure(`${path.basename(program)} was ended by ${result.signal}: start again.`)
   return { ok: result.status === 0, out: result.stdout, err: result.stderr }
 }

@@ -65,7 +65,8 @@ const allProcesses = () => fs.readdirSync('/proc').flatMap((entry) => {
 export function descendantsOf(pid) {
   if (!hasProc) return []
   const all = allProcesses()
-  const below = (/** @type {number} */ parent) => all.filter((each) => each.parent === parent).flatMap((each) => [each.pid, ...below(each.pid)])
+  /** @type {(parent: number) => number[]} */
+  const below = (parent) => all.filter((each) => each.parent === parent).flatMap((each) => [each.pid, ...below(each.pid)])
   return below(pid).map(identityOf)
 }
 

@@ -1,4 +1,5 @@
 import fs from 'node:fs'
+import { askedToStop } from './asked-to-stop.mjs'
 import { endAllGroups } from './children.mjs'
 import { installPostgres } from './debian.mjs'
 import { demoLines } from './demo-sign-ins.mjs'
@@ -25,12 +26,9 @@ const say = (/** @type {string} */ line) => console.log(line)
 export async function startHere(options) {
   const database = cluster('pg', say)
   const stopping = new AbortController()
-  const signalled = new Promise((resolve) => {
-    for (const signal of /** @type {const} */ (['SIGINT', 'SIGTERM', 'SIGHUP'])) process.on(signal, () => {
-      if (!stopping.signal.aborted) say('\nStopping …')
-      stopping.abort()
-      resolve(undefined)
-    })
+  const asked = askedToStop(() => {
+    if (!stopping.signal.aborted) say('\nStopping …')
+    stopping.abort()
   })
   let taken = false
   const run = async () => {
@@ -42,7 +40,7 @@ export async function startHere(options) {
   }
   // A signal ends the waiting at once; what still runs is ended in tidyUp, and how it fails then is no news.
   let told = ''
-  await Promise.race([signalled, run()]).catch((error) => {
+  await Promise.race([asked, run()]).catch((error) => {
     told = sentenceOf(error)
     console.error(told)
   })
@@ -58,7 +56,7 @@ export async function startHere(options) {
 }
 
 /**
- * @param {ReturnType<typeof cluster>} database
+ * @param {import('./pg-cluster.mjs').Cluster} database
  * @param {import('./start-options.mjs').StartOptions} options
  * @param {AbortSignal} stopping
  */
@@ -93,7 +91,7 @@ async function serve(database, { port, development }, stopping) {
 
 /**
  * Ends the web server first, then the database it writes to.
- * @param {ReturnType<typeof cluster>} database
+ * @param {import('./pg-cluster.mjs').Cluster} database
  */
 async function tidyUp(database) {
   await endAllGroups()

@@ -1,4 +1,5 @@
 import fs from 'node:fs'
+import { askedToStop } from './asked-to-stop.mjs'
 import { endAllGroups } from './children.mjs'
 import { installPostgres } from './debian.mjs'
 import { requireSpace } from './disk-space.mjs'
@@ -25,9 +26,7 @@ export async function testHere() {
   /** @type {{ name: string, took: string, line: string }[]} */
   const table = []
 
-  const signalled = new Promise((resolve) => {
-    for (const signal of /** @type {const} */ (['SIGINT', 'SIGTERM', 'SIGHUP'])) process.on(signal, () => resolve('stopped'))
-  })
+  const asked = askedToStop().then(() => 'stopped')
   const run = async () => {
     fs.mkdirSync(dataFolder, { recursive: true })
     requireSpace(root, 500, 'the tests')
@@ -46,7 +45,7 @@ export async function testHere() {
     }
     return 'ran'
   }
-  const how = await Promise.race([signalled, run()]).catch((error) => {
+  const how = await Promise.race([asked, run()]).catch((error) => {
     console.error(sentenceOf(error))
     counts.push({ passed: 0, failed: 1, notes: [] })
     return 'failed'
@@ -64,9 +63,8 @@ export async function testHere() {
 }
 
 /**
- * The test database is left running only when this command found it so, or another one works in it.
- * @param {ReturnType<typeof cluster>} database
- * @param {boolean} startedDatabase
+ * The test database is left running only while another command works in it.
+ * @param {import('./pg-cluster.mjs').Cluster} database
  */
 async function tidyUp(database) {
   await endAllGroups()

@@ -10,7 +10,7 @@ import { isAlive } from './processes.mjs'
 import { runningHere } from './running-here.mjs'
 import { countOne, countPlaywright, countVitest } from './test-counts.mjs'
 
-/** @typedef {ReturnType<typeof import('./pg-cluster.mjs').cluster>} Cluster */
+/** @typedef {import('./pg-cluster.mjs').Cluster} Cluster */
 /** @typedef {{ name: string, run: () => Promise<import('./test-counts.mjs').Count> }} Step */
 
 /** Each long run with its 30-second form; one is left out as long as its script does not exist. */

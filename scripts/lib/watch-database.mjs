@@ -9,7 +9,7 @@ const WITHIN_MS = 10 * 60_000
 /**
  * Starts the database again when it was killed; its journal brings back every committed record.
  * Ends with a sentence when it keeps dying or comes back elsewhere; returns when told to stop.
- * @param {ReturnType<typeof import('./pg-cluster.mjs').cluster>} database
+ * @param {import('./pg-cluster.mjs').Cluster} database
  * @param {AbortSignal} stopping
  * @returns {Promise<never | string>}
  */
