@@ -51,12 +51,20 @@ test('zod and calculation errors stand at their fields, the first of each', asyn
 })
 
 test('an unexpected error is logged once, with the id that is shown, and its text stays inside', async () => {
-  const state = await runAction(throwing(new Error('select secret from users')))
+  const state = await runAction(throwing(new Error('the secret is out')))
   expect(log).toHaveBeenCalledOnce()
   const entry = JSON.parse(String(log.mock.calls[0]?.[0])) as { id: string, message: string }
-  expect(entry).toMatchObject({ level: 'error', message: 'select secret from users', stack: expect.any(String) })
+  expect(entry).toMatchObject({ level: 'error', message: 'the secret is out', stack: expect.arrayContaining([expect.stringMatching(/^at /)]) })
   expect(state).toMatchObject({ ok: false, code: 'unexpected', formError: expect.stringContaining(`reference ${entry.id}.`) })
   expect(JSON.stringify(state)).not.toContain('secret')
+})
+
+test('the log keeps the words of the database and leaves out the statement with its values', async () => {
+  const message = `insert into "users" ("password_hash", "name") values ('$argon2id$x', 'Ada\nFell - Lane') returning "id" - deadlock detected`
+  await runAction(throwing(new Error(message)))
+  const entry = String(log.mock.calls[0]?.[0])
+  expect(JSON.parse(entry)).toMatchObject({ message: 'deadlock detected' })
+  expect(entry).not.toMatch(/argon2id|Ada|Fell/)
 })
 
 test.each([
