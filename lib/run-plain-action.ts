@@ -1,4 +1,4 @@
-import { notFound, redirect, unstable_rethrow } from 'next/navigation'
+import { notFound, redirect } from 'next/navigation'
 import { safeNext } from './auth/safe-next'
 import { AppError } from './errors'
 
@@ -10,7 +10,6 @@ export async function runPlainAction(fn: () => Promise<void>, form?: FormData): 
   try {
     await fn()
   } catch (thrown) {
-    unstable_rethrow(thrown)
     // Anything else goes on to the framework, which logs it and shows the error page with the id of that entry.
     if (!(thrown instanceof AppError)) throw thrown
     if (thrown.code === 'signedOut') redirect(`/sign-in?next=${encodeURIComponent(safeNext(form?.get('next')) ?? '')}`)
