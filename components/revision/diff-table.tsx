@@ -1,0 +1,49 @@
+import clsx from 'clsx'
+import type { ReactNode } from 'react'
+import { ChannelChip } from '@/components/ui/channel-chip'
+import { letterOf } from '@/lib/words/findings'
+
+export interface DiffColumn {
+  label: string
+  /** Shown in its place; the label is then for readers. */
+  digit: 1 | 2 | null
+}
+
+export interface DiffRow {
+  key: string
+  label: string
+  channel: 'primary' | 'backup' | null
+  /** Under the label: the limit. */
+  under?: string | null
+  left: ReactNode
+  right: ReactNode
+  /** 'same', a signed number, or nothing to say. */
+  difference: string | null
+  isSame: boolean
+  /** Texts of several lines stand at the left. */
+  isBlock?: boolean
+}
+
+function Head({ label, digit }: DiffColumn) {
+  return <th scope="col" className="r">{digit === null ? label : <><span className="digit" aria-hidden="true">{digit}</span><span className="sr">{label}</span></>}</th>
+}
+
+/** Two versions side by side with a column for the difference; on a phone the label stands over its figures. */
+export function DiffTable({ caption, columns, rows }: { caption: string, columns: [DiffColumn, DiffColumn], rows: readonly DiffRow[] }) {
+  return (
+    <table className="led diff">
+      <caption className="sr">{caption}</caption>
+      <thead><tr><td /><Head {...columns[0]} /><Head {...columns[1]} /><th scope="col" className="r">difference</th></tr></thead>
+      <tbody>
+        {rows.map((row) => (
+          <tr key={row.key} className={clsx(row.isBlock && 'tall') || undefined}>
+            <th scope="row">{row.channel ? <><ChannelChip channel={letterOf(row.channel)} /> </> : null}{row.label}{row.under ? <small className="block">{row.under}</small> : null}</th>
+            <td className="r">{row.left}</td>
+            <td className="r">{row.right}</td>
+            <td className="r df">{row.isSame ? <small>same</small> : row.difference ?? <small>changed</small>}</td>
+          </tr>
+        ))}
+      </tbody>
+    </table>
+  )
+}
