@@ -10,6 +10,7 @@ import { propellerPart, runUpPart } from './propeller-parts'
 import { proofPart } from './proof-part'
 import { leadsPart, registerPart } from './register-part'
 import type { CurvePoint, PartError, PerChannel, ScenarioParts, ScenarioResult } from './result-types'
+import { readyScenario } from './ready-scenario'
 import type { Scenario } from './scenario-types'
 import { advanceCurves, markedPoints, staggerCurve, staggerPoint } from './speed-points'
 
@@ -30,6 +31,7 @@ const publishedCurvature = [1.8e-4, 4e-4] as const
  */
 export function evaluateScenario(scenario: Scenario, limits: Limits = defaultLimits): ScenarioResult {
   const { engine, sheet } = scenario
+  const ready = readyScenario(scenario)
   const curves = part(() => advanceCurves(scenario))
   const stagger = part(() => {
     const { atCranking, atIdle, atMax, smallest, largest, backupEverFirst } = staggerReport(sheet.primary, sheet.backup, {
@@ -37,7 +39,7 @@ export function evaluateScenario(scenario: Scenario, limits: Limits = defaultLim
     })
     const at = (point: { rpm: number; staggerDeg: number }) => staggerPoint(scenario, point.rpm, point.staggerDeg)
     return {
-      curve: curves.ok ? staggerCurve(scenario, curves.rising) : [],
+      curve: curves.ok ? staggerCurve(ready, curves.rising) : [],
       atCranking: at(atCranking), atIdle: at(atIdle), atMax: at(atMax), smallest: at(smallest), largest: at(largest), backupEverFirst,
     }
   })
@@ -45,19 +47,19 @@ export function evaluateScenario(scenario: Scenario, limits: Limits = defaultLim
     ? [curves.rising, { primary: curves.falling.primary ?? [], backup: curves.falling.backup ?? [] }]
     : []
   const parts: ScenarioParts = {
-    speeds: part(() => ({ points: markedPoints(scenario) })),
+    speeds: part(() => ({ points: markedPoints(ready) })),
     curves,
     stagger,
-    power: part(() => powerPart(scenario)),
-    deadCylinders: part(() => deadCylindersPart(scenario)),
-    runUp: part(() => runUpPart(scenario)),
-    propeller: part(() => propellerPart(scenario)),
-    register: curves.ok ? part(() => registerPart(scenario, sampled)) : { ok: false, error: curves.error },
+    power: part(() => powerPart(ready)),
+    deadCylinders: part(() => deadCylindersPart(ready)),
+    runUp: part(() => runUpPart(ready)),
+    propeller: part(() => propellerPart(ready)),
+    register: curves.ok ? part(() => registerPart(ready, sampled)) : { ok: false, error: curves.error },
     leads: part(() => leadsPart(scenario)),
-    proof: part(() => proofPart(scenario)),
+    proof: part(() => proofPart(ready)),
     marks: part(() => ({ mmPerDeg: arcMm(engine.damperDiameterMm, 1) })),
   }
-  const findings = findingsOf(scenario, parts, limits)
+  const findings = findingsOf(ready, parts, limits)
   const count = (verdict: string) => findings.filter((finding) => finding.verdict === verdict).length
   const notices = noticesOf(scenario)
   const sourceIds = [...findings.flatMap((finding) => finding.sourceIds), ...notices.map((notice) => notice.source), 'heywood-1988']

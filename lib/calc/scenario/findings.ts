@@ -1,8 +1,9 @@
 import { staggerReport } from '../advance/stagger-report'
 import { judge, type LimitId, type Limits, type Verdict } from '../limits'
 import type { ChannelName, CurvePoint, Finding, PerChannel, ScenarioParts } from './result-types'
+import type { ReadyScenario } from './ready-scenario'
 import type { Scenario } from './scenario-types'
-import { advanceAt, channelNames, dependsOnPressure } from './speed-points'
+import { channelNames, dependsOnPressure } from './speed-points'
 
 /** Speeds looked at between slowest and fastest cranking, rpm apart. */
 const crankingStepRpm = 5
@@ -28,13 +29,13 @@ function pressuresOf({ sheet }: Scenario): number[] {
 }
 
 /** Greatest advance while the starter turns: slow cranking of a weak battery to the fastest, before and after a first fire. */
-function crankingDraft(scenario: Scenario, channel: ChannelName): Draft {
+function crankingDraft(scenario: ReadyScenario, channel: ChannelName): Draft {
   const { crankingSlowestRpm, crankingFastestRpm } = scenario.engine
   const steps = Math.ceil((crankingFastestRpm - crankingSlowestRpm) / crankingStepRpm)
   let worst = { rpm: crankingSlowestRpm, deg: -Infinity, released: false }
   for (const kpa of pressuresOf(scenario)) for (const trend of ['rising', 'falling'] as const) for (let i = 0; i <= steps; i += 1) {
     const rpm = i === steps ? crankingFastestRpm : crankingSlowestRpm + i * crankingStepRpm
-    const deg = advanceAt(scenario, channel, rpm, kpa, trend)
+    const deg = scenario.advance(channel, rpm, kpa, trend)
     if (deg > worst.deg + 1e-12) worst = { rpm, deg, released: trend === 'falling' }
   }
   return {
@@ -65,7 +66,7 @@ function retardDrafts({ engine, sheet }: Scenario, channel: ChannelName): Draft[
 
 /** Most advance beyond best torque from idle up, at full throttle and without retard. */
 function beyondMbtDraft({ sheet }: Scenario, channel: ChannelName, curve: CurvePoint[], idleRpm: number): Draft {
-  let worst: CurvePoint = { rpm: idleRpm, deg: -Infinity }
+  let worst = curve.at(-1) ?? { rpm: idleRpm, deg: -Infinity }
   for (const point of curve) if (point.rpm >= idleRpm && point.deg > worst.deg + 1e-12) worst = point
   return {
     limitId: 'beyondMbtDeg', channel, value: worst.deg - sheet.mbt.deg,
@@ -75,7 +76,7 @@ function beyondMbtDraft({ sheet }: Scenario, channel: ChannelName, curve: CurveP
 }
 
 /** Smallest stagger over cranking to full power, both ways of the hysteresis, at every pressure that matters. */
-function backupFirstDraft(scenario: Scenario): Draft {
+function backupFirstDraft(scenario: ReadyScenario): Draft {
   const { engine, sheet } = scenario
   const reports = pressuresOf(scenario).flatMap((mapKpa) => (['rising', 'falling'] as const).map((trend) => staggerReport(sheet.primary, sheet.backup, {
     crankingRpm: engine.crankingSlowestRpm, idleRpm: engine.idleRpm, maxRpm: engine.maxRpm, mapKpa, trend,
@@ -97,7 +98,7 @@ function proofDraft(scenario: Scenario, channel: ChannelName, proof: { rpm: PerC
 }
 
 /** Every finding the computed parts allow; a part that failed gives none. */
-function drafts(scenario: Scenario, parts: ScenarioParts, limits: Limits): Draft[] {
+function drafts(scenario: ReadyScenario, parts: ScenarioParts, limits: Limits): Draft[] {
   const { engine, sheet } = scenario
   const { curves, power, register, leads, proof, marks } = parts
   const list: Draft[] = []
@@ -143,7 +144,7 @@ const roomOf = ({ value, limit, sense, closeBand }: Finding) =>
 export const rankFindings = (findings: readonly Finding[]): Finding[] =>
   [...findings].sort((left, right) => rank[left.verdict] - rank[right.verdict] || roomOf(left) - roomOf(right) || left.id.localeCompare(right.id))
 
-export function findingsOf(scenario: Scenario, parts: ScenarioParts, limits: Limits): Finding[] {
+export function findingsOf(scenario: ReadyScenario, parts: ScenarioParts, limits: Limits): Finding[] {
   return rankFindings(drafts(scenario, parts, limits).map(({ limit: relative, ...draft }): Finding => {
     const { sense, value, closeBand, unit } = limits[draft.limitId]
     const limit = relative ?? value

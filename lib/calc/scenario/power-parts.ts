@@ -3,9 +3,10 @@ import { frictionMepKpa } from '../dead-cylinder/friction-mep'
 import { mepFromPower, powerFromMep } from '../dead-cylinder/mean-effective-pressure'
 import { timingTorqueRatio } from '../power/timing-torque'
 import { withheld } from './part'
-import type { DeadCylinderRow, PerChannel, PowerPoint } from './result-types'
+import type { ChannelName, DeadCylinderRow, PowerPoint } from './result-types'
+import type { ReadyScenario } from './ready-scenario'
 import type { Engine, Scenario } from './scenario-types'
-import { advanceAt, channelNames, curveSamples, perChannel } from './speed-points'
+import { channelNames, curveSamples, perChannel } from './speed-points'
 
 export const displacementCc = ({ cylinders, boreMm, strokeMm }: Engine): number => (cylinders * Math.PI * boreMm ** 2 * strokeMm) / 4000
 
@@ -40,13 +41,13 @@ export function frictionPowerAt(engine: Engine, rpm: number): number {
   return powerFromMep({ mepKpa: ratedMep * (frictionMepKpa({ rpm }) / frictionMepKpa({ rpm: engine.ratedRpm })), displacementCc: cc, rpm })
 }
 
-/** Torque at each channel's timing over the torque at the timing the power was measured with, at a speed and full throttle. */
-export function timingRatios(scenario: Scenario, rpm: number): PerChannel<number> {
+/** Torque at a channel's timing over the torque at the timing the power was measured with, by speed, full throttle. */
+export function timingRatioOf(scenario: ReadyScenario): (channel: ChannelName, rpm: number) => number {
   const { engine, sheet } = scenario
   const mbt = { mbtDeg: sheet.mbt.deg, curvaturePerDeg2: sheet.mbt.curvaturePerDeg2 }
   const reference = timingTorqueRatio(mbt, engine.powerTimingDeg)
   if (reference <= 0) throw withheld('noTorque', 'engine.powerTimingDeg', 'With this best-torque timing and loss the engine makes no torque at the timing its power was measured with.', engine.powerTimingDeg)
-  return perChannel((channel) => timingTorqueRatio(mbt, advanceAt(scenario, channel, rpm, sheet.manifold.fullKpa)) / reference)
+  return (channel, rpm) => timingTorqueRatio(mbt, scenario.advance(channel, rpm, sheet.manifold.fullKpa)) / reference
 }
 
 export function refuseTwoPlugs({ sheet }: Scenario): void {
@@ -55,16 +56,16 @@ export function refuseTwoPlugs({ sheet }: Scenario): void {
 }
 
 /** Full-throttle power and torque at each channel's timing. */
-export function powerPart(scenario: Scenario) {
+export function powerPart(scenario: ReadyScenario) {
   refuseTwoPlugs(scenario)
   const { engine, sheet } = scenario
   const { points, assumed } = fullThrottleCurve(engine)
+  const ratioOf = timingRatioOf(scenario)
   const powerAt = (rpm: number): PowerPoint | null => {
     const kw = curvePowerKw(points, rpm)
     if (kw === null) return null
-    const ratio = timingRatios(scenario, rpm)
-    const primaryKw = kw * ratio.primary
-    const backupKw = kw * ratio.backup
+    const primaryKw = kw * ratioOf('primary', rpm)
+    const backupKw = kw * ratioOf('backup', rpm)
     return { rpm, primaryKw, backupKw, primaryNm: (primaryKw * nmPerKwRpm) / rpm, backupNm: (backupKw * nmPerKwRpm) / rpm }
   }
   const from = Math.max(engine.idleRpm, points[0]?.rpm ?? 0)
@@ -72,24 +73,25 @@ export function powerPart(scenario: Scenario) {
     .filter((point) => point !== null)
   const atMax = powerAt(engine.maxRpm)
   if (!atMax) throw withheld('noTorque', 'engine.powerCurve', 'The power curve does not reach the full-power speed.', engine.maxRpm)
-  const ratio = timingRatios(scenario, engine.maxRpm)
+  const ratio = perChannel((channel) => ratioOf(channel, engine.maxRpm))
   if (ratio.primary <= 0) throw withheld('noTorque', 'sheet.primary.schedule', 'At this timing the primary leaves no torque at full power.')
   return {
     curve, atMax, curveAssumed: assumed,
     backupToPrimary: ratio.backup / ratio.primary,
-    shortOfMbtDeg: perChannel((channel) => sheet.mbt.deg - advanceAt(scenario, channel, engine.maxRpm, sheet.manifold.fullKpa)),
+    shortOfMbtDeg: perChannel((channel) => sheet.mbt.deg - scenario.advance(channel, engine.maxRpm, sheet.manifold.fullKpa)),
   }
 }
 
 /** Power left with 0…N dead cylinders on either channel, full throttle at full-power speed. */
-export function deadCylindersPart(scenario: Scenario) {
+export function deadCylindersPart(scenario: ReadyScenario) {
   refuseTwoPlugs(scenario)
   const { engine } = scenario
   const rpm = engine.maxRpm
   const brakePowerKw = curvePowerKw(fullThrottleCurve(engine).points, rpm)
   if (brakePowerKw === null) throw withheld('noTorque', 'engine.powerCurve', 'The power curve does not reach the full-power speed.', rpm)
   const frictionPowerKw = frictionPowerAt(engine, rpm)
-  const ratio = timingRatios(scenario, rpm)
+  const ratioOf = timingRatioOf(scenario)
+  const ratio = perChannel((channel) => ratioOf(channel, rpm))
   const rows = Array.from({ length: engine.cylinders + 1 }, (_, dead): DeadCylinderRow => {
     const [primary, backup] = channelNames.map((channel) => {
       const left = deadCylinderPower({ cylinders: engine.cylinders, dead, brakePowerKw, frictionPowerKw, timingRatio: ratio[channel] })

@@ -8,10 +8,11 @@ import { constantSpeedOperatingPoint } from '../propeller/constant-speed'
 import { fixedPitchOperatingPoint } from '../propeller/fixed-pitch'
 import { runUpDrop } from '../propeller/run-up'
 import { withheld } from './part'
-import { curvePowerKw, displacementCc, frictionPowerAt, fullThrottleCurve, refuseTwoPlugs, timingRatios } from './power-parts'
+import { curvePowerKw, displacementCc, frictionPowerAt, fullThrottleCurve, refuseTwoPlugs, timingRatioOf } from './power-parts'
 import type { ChannelName, PerChannel, PropellerPoint, PropellerRow, RunUpExpectation } from './result-types'
-import type { Pitch, Scenario } from './scenario-types'
-import { advanceAt, perChannel } from './speed-points'
+import type { ReadyScenario } from './ready-scenario'
+import type { Pitch } from './scenario-types'
+import { perChannel } from './speed-points'
 
 /** Exponents of engine torque against speed at fixed throttle: the expected one and both ends of the band. */
 const expectedExponent = -0.5
@@ -26,7 +27,7 @@ export const pitchLoadKw = (pitch: Pitch, rpm: number) => pitch.kw * (rpm / pitc
  * Expected run-up speed on each channel. Full-load torque ratio → indicated ratio with the mechanical efficiency at full
  * power → brake ratio at the propeller's load at run-up, where friction weighs more → drop.
  */
-export function runUpPart(scenario: Scenario) {
+export function runUpPart(scenario: ReadyScenario) {
   refuseTwoPlugs(scenario)
   const { engine, sheet } = scenario
   const rpm = sheet.runUpRpm
@@ -36,7 +37,7 @@ export function runUpPart(scenario: Scenario) {
   const fullKw = curvePowerKw(points, engine.maxRpm)
   if (fullKw === null || fullKw <= 0) throw withheld('noTorque', 'engine.powerCurve', 'The power curve does not reach the full-power speed.', engine.maxRpm)
   const mechanicalEfficiency = fullKw / (fullKw + frictionPowerAt(engine, engine.maxRpm))
-  const advance = perChannel((channel) => advanceAt(scenario, channel, rpm, sheet.manifold.runUpKpa))
+  const advance = perChannel((channel) => scenario.advance(channel, rpm, sheet.manifold.runUpKpa))
   const base = sheet.selection === 'both' ? Math.max(advance.primary, advance.backup) : advance.primary
   const fullLoadRatio = (channel: ChannelName, shiftDeg: number) => {
     const mbt = { mbtDeg: sheet.mbt.deg + shiftDeg, curvaturePerDeg2: sheet.mbt.curvaturePerDeg2 }
@@ -66,16 +67,17 @@ export function runUpPart(scenario: Scenario) {
 }
 
 /** Where full throttle meets the propeller: on either channel, and on the primary with one cylinder cold; standard sea level. */
-export function propellerPart(scenario: Scenario): { rows: PropellerRow[] } {
+export function propellerPart(scenario: ReadyScenario): { rows: PropellerRow[] } {
   refuseTwoPlugs(scenario)
   const { engine, sheet } = scenario
   const { points } = fullThrottleCurve(engine)
-  const onChannel = (channel: ChannelName) => (rpm: number) => timingRatios(scenario, rpm)[channel]
+  const ratioOf = timingRatioOf(scenario)
+  const onChannel = (channel: ChannelName) => (rpm: number) => ratioOf(channel, rpm)
   const oneCold = (rpm: number) => {
     const brakePowerKw = curvePowerKw(points, rpm)
     if (brakePowerKw === null || brakePowerKw <= 0) return 0
     const left = deadCylinderPower({
-      cylinders: engine.cylinders, dead: 1, brakePowerKw, frictionPowerKw: frictionPowerAt(engine, rpm), timingRatio: timingRatios(scenario, rpm).primary,
+      cylinders: engine.cylinders, dead: 1, brakePowerKw, frictionPowerKw: frictionPowerAt(engine, rpm), timingRatio: ratioOf('primary', rpm),
     })
     return Math.max(0, left.fraction)
   }

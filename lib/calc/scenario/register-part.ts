@@ -3,8 +3,9 @@ import { bestPhasingDeg } from '../rotor/best-phasing'
 import { rotorRegister } from '../rotor/rotor-register'
 import { withheld } from './part'
 import type { ChannelName, CurvePoint, PerChannel, RegisterRow } from './result-types'
+import type { ReadyScenario } from './ready-scenario'
 import type { Scenario } from './scenario-types'
-import { advanceAt, perChannel } from './speed-points'
+import { perChannel } from './speed-points'
 
 const isEven = (intervalsDeg: number[] | null) => !intervalsDeg || intervalsDeg.every((value) => Math.abs(value - (intervalsDeg[0] ?? 0)) < 1e-6)
 
@@ -25,7 +26,7 @@ function carriedDeg({ sheet }: Scenario, channel: ChannelName, rpm: number): num
 }
 
 /** Register of rotor and terminal from the spark's start to its end, at the worst speed of each channel. Distributor degrees. */
-export function registerPart(scenario: Scenario, curves: PerChannel<CurvePoint[]>[]): { worst: PerChannel<RegisterRow>; bestPhasingDeg: PerChannel<number> } {
+export function registerPart(scenario: ReadyScenario, curves: PerChannel<CurvePoint[]>[]): { worst: PerChannel<RegisterRow>; bestPhasingDeg: PerChannel<number> } {
   const { engine, sheet } = scenario
   if (sheet.distribution === 'directCoils') throw withheld('noRotor', 'sheet.distribution', 'Direct coils have no rotor.')
   if (!isEven(engine.intervalsDeg)) throw withheld('unevenCap', 'engine.intervalsDeg', 'The register is worked out for terminals spaced evenly round the cap; this engine fires unevenly.')
@@ -33,21 +34,28 @@ export function registerPart(scenario: Scenario, curves: PerChannel<CurvePoint[]
   const sparksOf = (channel: ChannelName) => {
     const atPressures = [sheet.manifold.idleKpa, sheet.manifold.runUpKpa]
       .map((kpa, i) => ({ rpm: i === 0 ? engine.idleRpm : sheet.runUpRpm, kpa }))
-      .map(({ rpm, kpa }) => ({ rpm, deg: advanceAt(scenario, channel, rpm, kpa) }))
+      .map(({ rpm, kpa }) => ({ rpm, deg: scenario.advance(channel, rpm, kpa) }))
     return [...curves.flatMap((curve) => curve[channel]), ...atPressures].map(({ rpm, deg }) => {
       const start = deg - carriedDeg(scenario, channel, rpm)
       return { rpm, advanceDeg: deg, start, end: start - crankDegFromMs(rotor.sparkDurationMs, rpm) }
     })
   }
-  const sparks = perChannel(sparksOf)
+  // The offset is largest at the earliest start or the latest end of a spark: the ones between cannot be worse.
+  const extremes = perChannel((channel) => {
+    const sparks = sparksOf(channel)
+    return [
+      sparks.reduce((earliest, spark) => (spark.start > earliest.start + 1e-12 ? spark : earliest)),
+      sparks.reduce((latest, spark) => (spark.end < latest.end - 1e-12 ? spark : latest)),
+    ]
+  })
   const phasedAtDeg = (channel: ChannelName) => (channel === 'backup' && sheet.distribution === 'capEach' ? rotor.backupPhasedAtDeg : rotor.phasedAtDeg)
   const worstOf = (channel: ChannelName): RegisterRow => {
     const rows = rotorRegister({
       cylinders: engine.cylinders, terminalWidthDeg: rotor.terminalWidthDeg, rotorWidthDeg: rotor.rotorWidthDeg, phasedAtDeg: phasedAtDeg(channel),
-      advancesDeg: sparks[channel].flatMap(({ start, end }) => [start, end]),
+      advancesDeg: extremes[channel].flatMap(({ start, end }) => [start, end]),
     })
     let worst: RegisterRow | null = null
-    sparks[channel].forEach(({ rpm, advanceDeg }, i) => {
+    extremes[channel].forEach(({ rpm, advanceDeg }, i) => {
       const start = rows[2 * i]
       const end = rows[2 * i + 1]
       if (!start || !end) return
@@ -58,7 +66,7 @@ export function registerPart(scenario: Scenario, curves: PerChannel<CurvePoint[]
     if (!worst) throw withheld('noRotor', 'sheet.rotor', 'No spark to judge.')
     return worst
   }
-  const best = (channels: ChannelName[]) => bestPhasingDeg(channels.flatMap((channel) => sparks[channel].flatMap(({ start, end }) => [start, end])))
+  const best = (channels: ChannelName[]) => bestPhasingDeg(channels.flatMap((channel) => extremes[channel].flatMap(({ start, end }) => [start, end])))
   return {
     worst: perChannel(worstOf),
     bestPhasingDeg: perChannel((channel) => best(sheet.distribution === 'sharedCap' ? ['primary', 'backup'] : [channel])),

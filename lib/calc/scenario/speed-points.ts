@@ -2,10 +2,10 @@ import { arcMm } from '../angle/arc'
 import { msFromCrankDeg } from '../angle/crank-time'
 import { distributorDegFromCrank } from '../angle/distributor'
 import { advanceCurve } from '../advance/advance-curve'
-import { sparkAdvanceDeg } from '../advance/spark-advance'
 import type { Channel } from '../advance/advance-types'
 import { forChannel } from './part'
 import type { ChannelName, CurvePoint, MarkedSpeed, PerChannel, SpeedPoint, StaggerPoint } from './result-types'
+import { readyScenario, type ReadyScenario } from './ready-scenario'
 import type { Scenario } from './scenario-types'
 
 export const channelNames = ['primary', 'backup'] as const satisfies readonly ChannelName[]
@@ -18,10 +18,6 @@ export const perChannel = <T>(compute: (channel: ChannelName) => T): PerChannel<
 /** True where the timing asks for the manifold pressure. */
 export const dependsOnPressure = ({ schedule }: Channel): boolean =>
   schedule.kind === 'map' || (schedule.kind === 'formula' && /\bmap\b/.test(schedule.expression))
-
-/** Advance of one channel in crank degrees before TDC at a speed (rpm) and manifold pressure (kPa). */
-export const advanceAt = (scenario: Scenario, channel: ChannelName, rpm: number, mapKpa: number, trend: 'rising' | 'falling' = 'rising'): number =>
-  forChannel(channel, () => sparkAdvanceDeg(scenario.sheet[channel], { rpm, mapKpa, trend }))
 
 /** A stagger in all its units; the arc stands at the trigger plate's radius over distributor degrees. */
 export function staggerPoint({ sheet }: Scenario, rpm: number, staggerDeg: number): StaggerPoint {
@@ -36,21 +32,24 @@ export function staggerPoint({ sheet }: Scenario, rpm: number, staggerDeg: numbe
 }
 
 /** Where both channels fire at one speed, at full-throttle pressure unless told otherwise, engine speeding up. */
-export function speedPointAt(scenario: Scenario, rpm: number, mapKpa = scenario.sheet.manifold.fullKpa): SpeedPoint {
-  const primaryDeg = advanceAt(scenario, 'primary', rpm, mapKpa)
-  const backupDeg = advanceAt(scenario, 'backup', rpm, mapKpa)
+export const speedPointAt = (scenario: Scenario, rpm: number, mapKpa = scenario.sheet.manifold.fullKpa): SpeedPoint =>
+  speedPoint(readyScenario(scenario), rpm, mapKpa)
+
+function speedPoint(scenario: ReadyScenario, rpm: number, mapKpa: number): SpeedPoint {
+  const primaryDeg = scenario.advance('primary', rpm, mapKpa)
+  const backupDeg = scenario.advance('backup', rpm, mapKpa)
   return { ...staggerPoint(scenario, rpm, primaryDeg - backupDeg), primaryDeg, backupDeg }
 }
 
 /** The four marked speeds, each at its own manifold pressure (cranking with the throttle cracked: full pressure). */
-export function markedPoints(scenario: Scenario): Record<MarkedSpeed, SpeedPoint> {
+export function markedPoints(scenario: ReadyScenario): Record<MarkedSpeed, SpeedPoint> {
   const { engine, sheet } = scenario
   const { idleKpa, runUpKpa, fullKpa } = sheet.manifold
   return {
-    cranking: speedPointAt(scenario, engine.crankingRpm, fullKpa),
-    idle: speedPointAt(scenario, engine.idleRpm, idleKpa),
-    runUp: speedPointAt(scenario, sheet.runUpRpm, runUpKpa),
-    full: speedPointAt(scenario, engine.maxRpm, fullKpa),
+    cranking: speedPoint(scenario, engine.crankingRpm, fullKpa),
+    idle: speedPoint(scenario, engine.idleRpm, idleKpa),
+    runUp: speedPoint(scenario, sheet.runUpRpm, runUpKpa),
+    full: speedPoint(scenario, engine.maxRpm, fullKpa),
   }
 }
 
@@ -71,12 +70,12 @@ export function advanceCurves(scenario: Scenario): { rising: PerChannel<CurvePoi
 }
 
 /** Stagger along two curves; a jump of either channel gives two points of one speed. */
-export function staggerCurve(scenario: Scenario, rising: PerChannel<CurvePoint[]>): StaggerPoint[] {
+export function staggerCurve(scenario: ReadyScenario, rising: PerChannel<CurvePoint[]>): StaggerPoint[] {
   const speeds = [...new Set([...rising.primary, ...rising.backup].map((point) => point.rpm))].sort((left, right) => left - right)
   const sidesOf = (channel: ChannelName) => {
     const byRpm = new Map<number, number[]>()
     for (const { rpm, deg } of rising[channel]) byRpm.set(rpm, [...(byRpm.get(rpm) ?? []), deg])
-    return (rpm: number): number[] => byRpm.get(rpm) ?? [advanceAt(scenario, channel, rpm, scenario.sheet.manifold.fullKpa)]
+    return (rpm: number): number[] => byRpm.get(rpm) ?? [scenario.advance(channel, rpm, scenario.sheet.manifold.fullKpa)]
   }
   const primary = sidesOf('primary')
   const backup = sidesOf('backup')

@@ -37,16 +37,18 @@ const numberError = (value: unknown, field: string, rule: NumberRule): CalcError
   return new CalcError({ field, value, limit: limitOf(rule), unit: rule.unit, message })
 }
 
+/** Whether a value is a finite number within the rule. */
+export const isAllowed = (value: unknown, rule: Omit<NumberRule, 'name'>): value is number =>
+  typeof value === 'number' && Number.isFinite(value)
+  && !(rule.min !== undefined && value < rule.min)
+  && !(rule.above !== undefined && value <= rule.above)
+  && !(rule.max !== undefined && value > rule.max)
+  && !(rule.below !== undefined && value >= rule.below)
+  && !(rule.integer === true && !Number.isSafeInteger(value))
+
 /** The value itself when it is a finite number within the rule, else a CalcError on `field`. Nothing is converted or clamped. */
 export const takeNumber = (value: unknown, field: string, rule: NumberRule): number => {
-  if (
-    typeof value !== 'number' || !Number.isFinite(value)
-    || (rule.min !== undefined && value < rule.min)
-    || (rule.above !== undefined && value <= rule.above)
-    || (rule.max !== undefined && value > rule.max)
-    || (rule.below !== undefined && value >= rule.below)
-    || (rule.integer === true && !Number.isSafeInteger(value))
-  ) throw numberError(value, field, rule)
+  if (!isAllowed(value, rule)) throw numberError(value, field, rule)
   return value
 }
 

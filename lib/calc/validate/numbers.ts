@@ -1,4 +1,4 @@
-import { takeNumber, type NumberRule } from './number'
+import { isAllowed, takeNumber, type NumberRule } from './number'
 
 /**
  * Checks every entry of a list and returns a copy. Goes by index: a hole in a sparse list is a missing entry,
@@ -7,7 +7,8 @@ import { takeNumber, type NumberRule } from './number'
 export const takeNumbers = (list: readonly unknown[], field: string, rule: Omit<NumberRule, 'name'>, nameOf: (index: number) => string): number[] => {
   const numbers: number[] = []
   for (let i = 0; i < list.length; i += 1) {
-    numbers.push(takeNumber(list[i], `${field}.${i}`, { ...rule, name: () => nameOf(i) }))
+    const value = list[i]
+    numbers.push(isAllowed(value, rule) ? value : takeNumber(value, `${field}.${i}`, { ...rule, name: () => nameOf(i) }))
   }
   return numbers
 }
