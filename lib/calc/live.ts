@@ -20,3 +20,20 @@ export { advanceCurve, type AdvanceCurveInput, type CurvePoint } from './advance
 export { proofSpeedRpm, type ProofSpeedInput } from './advance/proof-speed'
 export { staggerReport, type StaggerPoint, type StaggerReport, type StaggerReportInput } from './advance/stagger-report'
 export { loadFormulaParser } from './advance/load-formula-parser'
+
+export { curvatureFromPoint, timingTorqueRatio, type CurvaturePoint, type TimingParabola } from './power/timing-torque'
+export { fitTimingParabola, type TimingFit, type TorquePoint } from './power/fit-timing-parabola'
+export { brakeRatioFromIndicated, type BrakeRatioInput } from './power/brake-ratio'
+
+export { deadCylinderPower, type DeadCylinderInput, type DeadCylinderPower } from './dead-cylinder/dead-cylinder-power'
+export { morseTest, type MorseTestInput, type MorseTestResult } from './dead-cylinder/morse-test'
+export { frictionMepKpa, type FrictionMepInput } from './dead-cylinder/friction-mep'
+export { mepFromPower, powerFromMep, type MepFromPowerInput, type PowerFromMepInput } from './dead-cylinder/mean-effective-pressure'
+
+export type { PowerCurvePoint, PowerFraction, PropellerLoad } from './propeller/power-curve'
+export { fixedPitchOperatingPoint, type FixedPitchInput, type OperatingPoint } from './propeller/fixed-pitch'
+export { constantSpeedOperatingPoint, type ConstantSpeedInput, type GovernedPoint } from './propeller/constant-speed'
+export { runUpDrop, torqueRatioFromDrop, type RunUpDrop, type RunUpDropInput, type TorqueRatioInput } from './propeller/run-up'
+
+export { rotorRegister, type RotorRegister, type RotorRegisterInput } from './rotor/rotor-register'
+export { bestPhasingDeg } from './rotor/best-phasing'

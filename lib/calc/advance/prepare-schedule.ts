@@ -4,7 +4,7 @@ import { takeNumbers } from '../validate/numbers'
 import { takeChoice, takeList, takeRecord } from '../validate/shape'
 import type { Schedule } from './advance-types'
 import { compileFormula } from './formula'
-import { placeOn, valueAt } from './interpolate'
+import { placeOn, valueAt } from '../shared/interpolate'
 
 /** A schedule checked once, for evaluating many times. Holds copies: later changes of the argument do not reach it. */
 export interface PreparedSchedule {
