@@ -14,9 +14,9 @@ const released = async (world: World, author: Actor) => {
 }
 
 export const plans = [
-  declare(releaseRevision, { needs: 'plan.release', prepare: draft, args: ({ actor, target }) => [actor, target, 1, {}] }),
-  declare(getPlan, { needs: 'plan.read', prepare: released, args: ({ actor, target }) => [actor, target, 1] }),
-  declare(listPlans, { needs: 'plan.read', args: ({ actor }) => [actor, {}] }),
+  declare(releaseRevision, { needs: 'plan.release', prepare: draft, call: (fn, { actor, target }) => fn(actor, target, 1, {}) }),
+  declare(getPlan, { needs: 'plan.read', prepare: released, call: (fn, { actor, target }) => fn(actor, target, 1) }),
+  declare(listPlans, { needs: 'plan.read', call: (fn, { actor }) => fn(actor, {}) }),
 
-  declare(listPlansRoute, { needs: 'plan.read', args: () => [new Request('http://127.0.0.1/api/plans')] }),
+  declare(listPlansRoute, { needs: 'plan.read', call: (fn) => fn(new Request('http://127.0.0.1/api/plans')) }),
 ]

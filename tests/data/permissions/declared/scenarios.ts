@@ -15,28 +15,27 @@ import { declare, type World } from '../declare'
 
 const engine = async ({ author }: World) => (await anEngine(author)).id
 const prepare = async (world: World, author: Actor) => (await aScenario(author, world.author)).id
-const byId = ({ actor, target }: { actor: Actor, target: string }): [Actor, string] => [actor, target]
 
 export const scenarios = [
-  declare(listScenarios, { needs: 'scenario.read', own: 'scenario.readOwn', args: ({ actor }) => [actor, {}] }),
-  declare(getScenario, { needs: 'scenario.read', own: 'scenario.readOwn', prepare, args: byId }),
-  declare(listRevisions, { needs: 'scenario.read', own: 'scenario.readOwn', prepare, args: byId }),
-  declare(getRevision, { needs: 'scenario.read', own: 'scenario.readOwn', prepare, args: ({ actor, target }) => [actor, target, 1] }),
+  declare(listScenarios, { needs: 'scenario.read', own: 'scenario.readOwn', call: (fn, { actor }) => fn(actor, {}) }),
+  declare(getScenario, { needs: 'scenario.read', own: 'scenario.readOwn', prepare, call: (fn, { actor, target }) => fn(actor, target) }),
+  declare(listRevisions, { needs: 'scenario.read', own: 'scenario.readOwn', prepare, call: (fn, { actor, target }) => fn(actor, target) }),
+  declare(getRevision, { needs: 'scenario.read', own: 'scenario.readOwn', prepare, call: (fn, { actor, target }) => fn(actor, target, 1) }),
   declare(createScenario, {
-    needs: 'scenario.create', prepare: engine, args: ({ actor, target: engineId }) => [actor, { engineId, engineVersion: 1, title: 'New', sheet: sheet() }],
+    needs: 'scenario.create', prepare: engine, call: (fn, { actor, target: engineId }) => fn(actor, { engineId, engineVersion: 1, title: 'New', sheet: sheet() }),
   }),
-  declare(evaluateForActor, { needs: 'scenario.create', prepare: engine, args: ({ actor, target: engineId }) => [actor, { engineId, sheet: sheet() }] }),
+  declare(evaluateForActor, { needs: 'scenario.create', prepare: engine, call: (fn, { actor, target: engineId }) => fn(actor, { engineId, sheet: sheet() }) }),
   declare(saveScenario, {
     needs: 'scenario.write', own: 'scenario.writeOwn', prepare,
-    args: ({ actor, target }) => [actor, target, { baseRevision: 1, engineVersion: 1, title: 'Changed', sheet: sheet() }],
+    call: (fn, { actor, target }) => fn(actor, target, { baseRevision: 1, engineVersion: 1, title: 'Changed', sheet: sheet() }),
   }),
-  declare(duplicateScenario, { needs: 'scenario.read', own: 'scenario.readOwn', prepare, args: byId }),
-  declare(archiveScenario, { needs: 'scenario.archive', own: 'scenario.archiveOwn', prepare, args: byId }),
-  declare(restoreScenario, { needs: 'scenario.archive', own: 'scenario.archiveOwn', prepare, args: byId }),
+  declare(duplicateScenario, { needs: 'scenario.read', own: 'scenario.readOwn', prepare, call: (fn, { actor, target }) => fn(actor, target) }),
+  declare(archiveScenario, { needs: 'scenario.archive', own: 'scenario.archiveOwn', prepare, call: (fn, { actor, target }) => fn(actor, target) }),
+  declare(restoreScenario, { needs: 'scenario.archive', own: 'scenario.archiveOwn', prepare, call: (fn, { actor, target }) => fn(actor, target) }),
 
-  declare(listScenariosRoute, { needs: 'scenario.read', own: 'scenario.readOwn', args: () => [new Request('http://127.0.0.1/api/scenarios?sort=title')] }),
+  declare(listScenariosRoute, { needs: 'scenario.read', own: 'scenario.readOwn', call: (fn) => fn(new Request('http://127.0.0.1/api/scenarios?sort=title')) }),
   declare(listRevisionsRoute, {
     needs: 'scenario.read', own: 'scenario.readOwn', prepare,
-    args: ({ target: id }) => [new Request(`http://127.0.0.1/api/scenarios/${id}/revisions`), { params: Promise.resolve({ id }) }],
+    call: (fn, { target: id }) => fn(new Request(`http://127.0.0.1/api/scenarios/${id}/revisions`), { params: Promise.resolve({ id }) }),
   }),
 ]
