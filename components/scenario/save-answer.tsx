@@ -36,7 +36,7 @@ export function SaveAnswer({ answer, values, errors, system, onKeepMine, onTakeT
           <p>Nothing is lost: theirs is stored, yours is still here in the form. These inputs differ:</p>
         </FailedNote>
         <InputDifferences
-          fields={scenarioFields}
+          fields={scenarioFields} system={system}
           left={{ label: `Theirs, revision ${theirs.number}`, values: scenarioToForm(theirs.title, theirs.sheet, system) }}
           right={{ label: 'Yours, not saved', values }}
         />
