@@ -1,5 +1,6 @@
 'use client'
 
+import { PlotPieces } from './plot-pieces'
 import { Section } from '@/components/ui/section'
 import { DegreeWheel } from '@/components/wheel/degree-wheel'
 
@@ -21,6 +22,7 @@ const wheels = [
 export function DrawingPieces() {
   return (
     <>
+      <PlotPieces />
       <Section title="Wheels">
         <div className="flex flex-wrap gap-6 pt-3">
           {wheels.map(({ title, ...wheel }) => (

@@ -20,7 +20,7 @@ export function DegreeWheel({ size = 'auto', width, ...rest }: DegreeWheelProps)
   if (size !== 'auto') return <div className="wheel"><WheelDrawing {...rest} size={size} width={width ?? (size === 'full' ? servedFull : size === 'crop' ? servedCrop : 238)} /></div>
   const given = found === null ? null : Math.min(found, width ?? servedFull)
   return (
-    <div className="wheel" ref={ref}>
+    <div className="wheel drawn" ref={ref}>
       {given === null ? (
         <>
           <div className="only-w"><WheelDrawing {...rest} size="full" width={width ?? servedFull} /></div>
