@@ -1,7 +1,7 @@
 import { spawnSync } from 'node:child_process'
 import fs from 'node:fs'
 import { runToEnd } from './children.mjs'
-import { lastLines, stepSentence } from './failed-step.mjs'
+import { stepFailure } from './failed-step.mjs'
 import { Failure } from './failure.mjs'
 import { installedPrograms, isRoot, postgresIds } from './pg-programs.mjs'
 
@@ -27,8 +27,7 @@ export const missingSentence = (what, line, debian) =>
 async function apt(...args) {
   const outcome = await runToEnd('apt-get', ['-q', '-o', 'DPkg::Lock::Timeout=120', ...args], { minutes: 15, env: { DEBIAN_FRONTEND: 'noninteractive' } })
   if (outcome.ok) return
-  console.error(lastLines(outcome.tail))
-  throw new Failure(stepSentence(`apt-get ${args.join(' ')}`, outcome, 'its own words stand above.'))
+  throw stepFailure(`Installing from Debian (apt-get ${args.join(' ')})`, outcome, 'its own words stand above.', true)
 }
 
 /**

@@ -8,7 +8,12 @@ import { Failure } from './failure.mjs'
  * @param {string} purpose
  */
 export function requireSpace(folder, megabytes, purpose) {
-  const { bavail, bsize } = fs.statfsSync(folder)
-  const free = Math.floor((bavail * bsize) / 1e6)
+  const free = freeMegabytes(folder)
   if (free < megabytes) throw new Failure(`The disk that holds ${folder} has ${free} MB left, and ${purpose} need ${megabytes} MB: free some space, then start again.`)
+}
+
+/** @param {string} folder */
+export function freeMegabytes(folder) {
+  const { bavail, bsize } = fs.statfsSync(folder)
+  return Math.floor((bavail * bsize) / 1e6)
 }

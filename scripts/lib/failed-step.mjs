@@ -1,20 +1,33 @@
-import { diskFullSentence } from './failure.mjs'
+import { Failure, diskFullSentence } from './failure.mjs'
 import { root } from './paths.mjs'
 
 /**
- * The one sentence for a program that failed, from the last of its output.
- * @param {string} what the step as a noun, such as “The build”
- * @param {{ tail: string, timedOut: boolean, minutes?: number }} outcome
- * @param {string} otherwise what to do when the cause is none of the known ones
+ * Why a program failed, in one sentence, from the last of its output; null when it shows none of the known causes.
+ * @param {string} what the step as it begins a sentence, such as “The build”
+ * @param {string} tail
+ * @param {boolean} [download] whether it fetches from the network; elsewhere a refused connection means something else
  */
-export function stepSentence(what, outcome, otherwise) {
-  if (outcome.timedOut) return `${what} did not end in its time and was stopped: look at what stands above, then start again.`
-  if (/ENOSPC|EDQUOT|No space left on device|don't have enough free space|disk quota exceeded/i.test(outcome.tail)) return diskFullSentence(root)
-  if (isNetworkTrouble(outcome.tail)) return `${what} found no network: connect this machine to the internet (or set its proxy), then start again.`
-  if (/Could not get lock|is another process using it/i.test(outcome.tail)) return `${what} waits for another installation on this machine: let that one end, then start again.`
-  if (/\bENOENT\b.*spawn|spawn .*\bENOENT\b/.test(outcome.tail)) return `${what} needs a program that is not on this machine (${/spawn (\S+)/.exec(outcome.tail)?.[1] ?? 'unknown'}): install it, then start again.`
-  if (/heap out of memory|Cannot allocate memory|\bENOMEM\b/i.test(outcome.tail)) return `${what} ran out of memory: close other programs, then start again.`
-  return `${what} failed: ${otherwise}`
+export function knownCause(what, tail, download = false) {
+  if (/ENOSPC|EDQUOT|No space left on device|don't have enough free space|disk quota exceeded/i.test(tail)) return diskFullSentence(root)
+  if (download && isNetworkTrouble(tail)) return `${what} found no network: connect this machine to the internet (or set its proxy), then start again.`
+  if (/Could not get lock|is another process using it/i.test(tail)) return `${what} waits for another installation on this machine: let that one end, then start again.`
+  if (/spawn \S+ ENOENT/.test(tail)) return `${what} needs the program ${/spawn (\S+) ENOENT/.exec(tail)?.[1]}, which is not on this machine: install it, then start again.`
+  if (/heap out of memory|Cannot allocate memory|\bENOMEM\b/i.test(tail)) return `${what} ran out of memory: close other programs, then start again.`
+  return null
+}
+
+/**
+ * The failure to throw for a program that failed. Its own last words are shown only where they must speak for themselves.
+ * @param {string} what
+ * @param {{ tail: string, timedOut: boolean }} outcome
+ * @param {string} otherwise what to do when the cause is none of the known ones
+ * @param {boolean} [download]
+ */
+export function stepFailure(what, { tail, timedOut }, otherwise, download = false) {
+  const known = timedOut ? null : knownCause(what, tail, download)
+  if (known) return new Failure(known)
+  console.error(lastLines(tail))
+  return new Failure(timedOut ? `${what} did not end in its time and was stopped: its last words stand above.` : `${what} failed: ${otherwise}`)
 }
 
 /** @param {string} text */
@@ -26,4 +39,4 @@ export const isNetworkTrouble = (text) =>
  * @param {string} text
  * @param {number} [lines]
  */
-export const lastLines = (text, lines = 25) => text.trimEnd().split('\n').slice(-lines).join('\n')
+export const lastLines = (text, lines = 40) => text.trimEnd().split('\n').slice(-lines).join('\n')

@@ -20,7 +20,8 @@ export function writeWhole(file, text) {
     fs.renameSync(part, file)
   } catch (error) {
     fs.rmSync(part, { force: true })
-    throw error
+    // A write names no path of its own, and the sentence for a full disk wants one.
+    throw Object.assign(/** @type {Error} */ (error), { path: file })
   }
 }
 

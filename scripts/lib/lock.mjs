@@ -2,16 +2,14 @@ import fs from 'node:fs'
 import path from 'node:path'
 import { setTimeout as sleep } from 'node:timers/promises'
 import { Failure } from './failure.mjs'
-import { readIfThere } from './keep-file.mjs'
 import { identityOf, isSameAlive } from './processes.mjs'
 
 const PATIENCE_MS = 180_000
 
-/** A lock is created empty and filled a moment later; only an old empty one was left by a crash. */
-const EMPTY_MS = 5_000
-
 /**
- * Runs `work` while holding the lock file; waits while another living process holds it.
+ * Runs `work` while holding the lock; waits while another living process holds it.
+ * The lock is a symbolic link whose target names its holder: it comes into being whole, and needs no room on a
+ * full disk, where a database must still be stopped.
  * @template T
  * @param {string} file
  * @param {() => T | Promise<T>} work
@@ -35,7 +33,7 @@ export async function withLock(file, work) {
 /** @param {string} file */
 function take(file) {
   try {
-    fs.writeFileSync(file, identityOf(process.pid), { flag: 'wx', mode: 0o600 })
+    fs.symlinkSync(identityOf(process.pid), file)
     return true
   } catch (error) {
     if (/** @type {NodeJS.ErrnoException} */ (error).code === 'EEXIST') return false
@@ -43,16 +41,26 @@ function take(file) {
   }
 }
 
+/** Who holds the lock; null when nobody does. @param {string} file */
+function holderOf(file) {
+  try {
+    return fs.readlinkSync(file)
+  } catch (error) {
+    if (/** @type {NodeJS.ErrnoException} */ (error).code === 'ENOENT') return null
+    throw error
+  }
+}
+
 /** @param {string} file */
 function clearStale(file) {
-  const holder = readIfThere(file)
+  const holder = holderOf(file)
   if (holder === null || isSameAlive(holder)) return
-  if (holder === '' && Date.now() - (fs.statSync(file, { throwIfNoEntry: false })?.mtimeMs ?? Date.now()) < EMPTY_MS) return
   // Renamed before it is removed: of two who saw the same stale lock only one gets it, and a fresh one taken by mistake is put back.
   const aside = `${file}.${process.pid}.stale`
   try {
     fs.renameSync(file, aside)
-    if (readIfThere(aside) !== holder) fs.linkSync(aside, file)
+    const taken = holderOf(aside)
+    if (taken !== null && taken !== holder) fs.symlinkSync(taken, file)
   } catch {
     // Somebody else was faster; the next round sees what is there.
   }

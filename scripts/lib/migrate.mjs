@@ -1,6 +1,6 @@
 import fs from 'node:fs'
 import { runToEnd } from './children.mjs'
-import { lastLines, stepSentence } from './failed-step.mjs'
+import { stepFailure } from './failed-step.mjs'
 import { Failure } from './failure.mjs'
 import { inRoot } from './paths.mjs'
 
@@ -35,8 +35,7 @@ export async function migrate(database, name) {
     minutes: 10, env: { DATABASE_URL: database.url(name), MIKRO_SNAPSHOT: '' },
   })
   if (!outcome.ok) {
-    console.error(lastLines(outcome.tail))
-    throw new Failure(stepSentence('Bringing the database up to date', outcome, 'the database’s own words stand above, and it was left as it was before the failing migration.'))
+    throw stepFailure('Bringing the database up to date', outcome, 'the database’s own words stand above, and it was left as it was before the failing migration.')
   }
   return pending.length
 }
@@ -51,6 +50,5 @@ export async function seed(database, name) {
     minutes: 5, env: { DATABASE_URL: database.url(name) },
   })
   if (outcome.ok) return
-  console.error(lastLines(outcome.tail))
-  throw new Failure(stepSentence('Laying in the demo', outcome, 'the words of scripts/seed.ts stand above.'))
+  throw stepFailure('Laying in the demo', outcome, 'the words of scripts/seed.ts stand above.')
 }

@@ -1,7 +1,7 @@
 import { createHash } from 'node:crypto'
 import fs from 'node:fs'
 import { runToEnd } from './children.mjs'
-import { lastLines, stepSentence } from './failed-step.mjs'
+import { stepFailure } from './failed-step.mjs'
 import { Failure } from './failure.mjs'
 import { requireSpace } from './disk-space.mjs'
 import { readIfThere } from './keep-file.mjs'
@@ -51,8 +51,7 @@ export async function installPackages(say) {
   const args = ['ci', '--include=dev', '--no-audit', '--no-fund', '--loglevel=error']
   const outcome = await (npm ? runToEnd(process.execPath, [npm, ...args], { minutes: 15 }) : runToEnd('npm', args, { minutes: 15 }))
   if (!outcome.ok) {
-    console.error(lastLines(outcome.tail))
-    throw new Failure(stepSentence('Installing the npm packages', outcome, 'npm’s own words stand above; when they name no cause, remove node_modules and start again.'))
+    throw stepFailure('Installing the npm packages', outcome, 'npm’s own words stand above; when they name no cause, remove node_modules and start again.', true)
   }
   fs.writeFileSync(stampFile(), stamp)
 }

@@ -60,6 +60,8 @@ export function cluster(name, say = () => {}) {
       for (const place of [folder, `${folder}.log`, `${folder}.log.old`]) fs.rmSync(place, { recursive: true, force: true })
     }
     fs.rmSync(infoFileOf(name), { force: true })
+    const far = farFolder(root)
+    if (fs.existsSync(far) && fs.readdirSync(far).length === 0) fs.rmdirSync(far)
   }
 
   return {

@@ -3,9 +3,9 @@ import fs from 'node:fs'
 import os from 'node:os'
 import path from 'node:path'
 import { Failure } from './failure.mjs'
-import { inData } from './paths.mjs'
+import { inData, root } from './paths.mjs'
 import { USER, infoFileOf, logOf, majorOfFolder, readInfo, writeInfo } from './pg-info.mjs'
-import { isReachable, makeClusterFolder } from './pg-place.mjs'
+import { farFolder, isReachable, makeClusterFolder } from './pg-place.mjs'
 import { programFor } from './pg-programs-for.mjs'
 import { ownerFor, runAs } from './pg-programs.mjs'
 import { goneSentence, lostPasswordSentence, missingVersionSentence, startSentence, unreachableSentence } from './pg-sentences.mjs'
@@ -17,7 +17,8 @@ import { goneSentence, lostPasswordSentence, missingVersionSentence, startSenten
  */
 export function createCluster(name, say) {
   const known = readInfo(name)
-  if (!known && majorOfFolder(inData(name)) !== null) throw new Failure(lostPasswordSentence(inData(name), infoFileOf(name)))
+  const forgotten = [inData(name), path.join(farFolder(root), name)].find((folder) => majorOfFolder(folder) !== null)
+  if (!known && forgotten) throw new Failure(lostPasswordSentence(forgotten, infoFileOf(name)))
   // An earlier first start was cut short before its database existed: nothing of anybody's is in there.
   if (known) fs.rmSync(known.folder, { recursive: true, force: true })
   const info = { folder: makeClusterFolder(name, say), port: 0, password: randomBytes(18).toString('base64url'), ready: false }

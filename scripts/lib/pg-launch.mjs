@@ -1,6 +1,7 @@
 import fs from 'node:fs'
 import { setTimeout as sleep } from 'node:timers/promises'
-import { Failure } from './failure.mjs'
+import { freeMegabytes } from './disk-space.mjs'
+import { Failure, diskFullSentence } from './failure.mjs'
 import { logOf, writeInfo } from './pg-info.mjs'
 import { clearAfterCrash, postmasterOf } from './pg-processes.mjs'
 import { programFor } from './pg-programs-for.mjs'
@@ -36,6 +37,8 @@ export async function launch(name, info) {
     const started = runAs(owner, programFor(info.folder, 'pg_ctl'), ['start', '-D', info.folder, '-w', '-t', String(START_SECONDS), '-l', log, '-o', options.join(' ')])
     if (started.ok) return
     const written = fs.readFileSync(log).subarray(from).toString('utf8') || started.err
+    // A full disk may keep its own name from the log.
+    if (freeMegabytes(info.folder) < 20) throw new Failure(diskFullSentence(info.folder))
     if (!lostPort(written) || attempt === 3) throw new Failure(startSentence(written, info.folder, log))
     info.port = 0
   }

@@ -42,7 +42,8 @@ function makeReachable(folder) {
     if (!isRoot || !['EPERM', 'EACCES', 'EINVAL', 'ENOTSUP', 'EROFS'].includes(refused.code ?? ''))
       throw new Failure(fileSentence(refused, folder) ?? `${folder} cannot be made: ${refused.message}.`)
   }
-  fs.rmSync(folder, { recursive: true, force: true })
+  // Only an empty folder is taken away again; what lies in any other is not ours to judge here.
+  if (fs.existsSync(folder) && fs.readdirSync(folder).length === 0) fs.rmdirSync(folder)
   return false
 }
 

@@ -4,7 +4,7 @@ import { endAllGroups } from './children.mjs'
 import { installPostgres } from './debian.mjs'
 import { demoLines } from './demo-sign-ins.mjs'
 import { requireSpace } from './disk-space.mjs'
-import { lastLines, stepSentence } from './failed-step.mjs'
+import { stepFailure } from './failed-step.mjs'
 import { Failure, sentenceOf } from './failure.mjs'
 import { migrate, seed } from './migrate.mjs'
 import { build, isBuilt } from './next-build.mjs'
@@ -77,8 +77,7 @@ async function serve(database, { port, development }, stopping) {
     say('Building, about half a minute …')
     const outcome = await build()
     if (!outcome.ok && !stopping.aborted) {
-      console.error(lastLines(outcome.tail, 40))
-      throw new Failure(stepSentence('The build', outcome, 'its own words stand above.'))
+      throw stepFailure('The build', outcome, 'its own words stand above.')
     }
   }
   if (stopping.aborted) return
