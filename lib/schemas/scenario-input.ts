@@ -1,19 +1,24 @@
 import { z } from 'zod'
+import type { ScenarioSheet } from '../calc/scenario/scenario-types'
+import type { ScenarioSheet } from '../calc/scenario/scenario-types'
 import { scenarioSheet, scenarioTitle } from './scenario'
+
+/** Callers hold the library's own read-only type; the schema checks it all the same. */
+type WithSheet<T> = Omit<T, 'sheet'> & { sheet: ScenarioSheet }
 
 const version = z.int().min(1)
 
 /** A new scenario. `engineVersion`: the engine as the form showed it. */
 export const scenarioCreateInput = z.object({ engineId: z.string(), engineVersion: version, title: scenarioTitle, sheet: scenarioSheet })
-export type ScenarioCreateInput = z.input<typeof scenarioCreateInput>
+export type ScenarioCreateInput = WithSheet<z.input<typeof scenarioCreateInput>>
 
 /** A save. `baseRevision`: the revision the form was opened on. Results are never part of it. */
 export const scenarioSaveInput = z.object({ baseRevision: version, engineVersion: version, title: scenarioTitle, sheet: scenarioSheet })
-export type ScenarioSaveInput = z.input<typeof scenarioSaveInput>
+export type ScenarioSaveInput = WithSheet<z.input<typeof scenarioSaveInput>>
 
 /** An evaluation that stores nothing. */
 export const scenarioEvaluateInput = z.object({ engineId: z.string(), sheet: scenarioSheet })
-export type ScenarioEvaluateInput = z.input<typeof scenarioEvaluateInput>
+export type ScenarioEvaluateInput = WithSheet<z.input<typeof scenarioEvaluateInput>>
 
 /** Least length of the reason for a release with a finding outside, characters. */
 export const leastReason = 10

@@ -1,0 +1,103 @@
+'use client'
+
+import { useMemo, useState } from 'react'
+import { AdvancePlot } from '@/components/plots/advance-plot'
+import type { AdvanceChannel, SpeedMark } from '@/components/plots/advance-curves'
+import { DegreeWheel } from '@/components/wheel/degree-wheel'
+import { firingSchedule } from '@/lib/calc/angle/firing-schedule'
+import { Withheld } from '@/lib/calc/scenario/part'
+import type { PartName, ScenarioResult, SpeedPoint } from '@/lib/calc/scenario/result-types'
+import type { Engine, Scenario, ScenarioSheet } from '@/lib/calc/scenario/scenario-types'
+import { dependsOnPressure, speedPointAt } from '@/lib/calc/scenario/speed-points'
+import { formatQuantityText, type UnitSystem } from '@/lib/units'
+import { scheduleKinds } from '@/lib/schemas/scenario-fields'
+import { PartView } from './stale-part'
+
+interface TimingDrawingsProps {
+  scenario: Scenario
+  /** Of the newest edit: the wheel follows it in the same frame. */
+  result: ScenarioResult
+  /** A frame later: the curves. */
+  deferred: ScenarioResult
+  stale: ReadonlySet<PartName>
+  system: UnitSystem
+  /** For file names. */
+  name: string
+}
+
+const kindName = (kind: string) => scheduleKinds.find(({ value }) => value === kind)?.label ?? kind
+const roundUp = (rpm: number) => Math.ceil(rpm / 100) * 100
+
+function speedMarks({ engine, sheet }: Scenario): SpeedMark[] {
+  return [{ label: 'crank', rpm: engine.crankingRpm }, { label: 'idle', rpm: engine.idleRpm }, { label: 'run-up', rpm: sheet.runUpRpm }, { label: 'full power', rpm: engine.maxRpm }]
+}
+
+function drawnChannels({ parts }: ScenarioResult, sheet: ScenarioSheet): AdvanceChannel[] {
+  if (!parts.curves.ok) return []
+  const { rising, falling } = parts.curves
+  return [
+    { channel: 'A', name: `A primary, ${kindName(sheet.primary.schedule.kind)}`, rising: rising.primary, ...(falling.primary ? { falling: falling.primary } : {}) },
+    { channel: 'B', name: `B backup, ${kindName(sheet.backup.schedule.kind)}`, rising: rising.backup, ...(falling.backup ? { falling: falling.backup } : {}) },
+  ]
+}
+
+const cylindersOf = (engine: Engine) => firingSchedule({ firingOrder: engine.firingOrder, ...(engine.intervalsDeg ? { intervalsDeg: engine.intervalsDeg } : {}) })
+  .map(({ cylinder, atDeg }) => ({ label: String(cylinder), atDeg }))
+
+/** Both sparks at a speed; null where a channel cannot be computed there, and the wheel keeps what it can. */
+function pointAt(scenario: Scenario, rpm: number): SpeedPoint | null {
+  try {
+    return speedPointAt(scenario, rpm)
+  } catch (error) {
+    if (error instanceof Withheld) return null
+    throw error
+  }
+}
+
+/** The degree wheel at the chosen speed and the advance curves; the speed axis of the plot chooses. */
+export function TimingDrawings({ scenario, result, deferred, stale, system, name }: TimingDrawingsProps) {
+  const { engine, sheet } = scenario
+  const [chosen, setChosen] = useState<number | null>(null)
+  const rpm = chosen ?? engine.maxRpm
+  const point = useMemo(() => pointAt(scenario, rpm), [scenario, rpm])
+  const cylinders = useMemo(() => cylindersOf(engine), [engine])
+  const channels = useMemo(() => drawnChannels(deferred, sheet), [deferred, sheet])
+  const marks = useMemo(() => speedMarks(scenario), [scenario])
+  const followsPressure = dependsOnPressure(sheet.primary) || dependsOnPressure(sheet.backup)
+  const fullPressure = formatQuantityText(sheet.manifold.fullKpa, 'pressure', system)
+  const unreadable = stale.has('curves')
+  return (
+    <div className="two">
+      <div className={unreadable ? 'stale' : undefined}>
+        <DegreeWheel
+          rpm={rpm} rotation={engine.crankRotation} cylindersAt={cylinders}
+          primaryDeg={point?.primaryDeg ?? null} backupDeg={point?.backupDeg ?? null} staggerDeg={point?.staggerDeg ?? null} staggerMs={point?.staggerMs ?? null}
+        />
+        <SpeedLine point={point} system={system} />
+      </div>
+      <PartView name="curves" part={result.parts.curves} stale={unreadable}>
+        {() => (
+          <>
+            <AdvancePlot
+              title="Advance against speed" channels={channels} marks={marks} fromRpm={0} toRpm={roundUp(engine.maxRpm * 1.08)} rpm={rpm} onRpm={setChosen}
+              at={{ A: point?.primaryDeg ?? null, B: point?.backupDeg ?? null }} csvName={`${name}-advance`}
+            />
+            {followsPressure ? <p className="fine">Drawn at full-throttle manifold pressure, {fullPressure}; idle and run-up figures use their own.</p> : null}
+          </>
+        )}
+      </PartView>
+    </div>
+  )
+}
+
+/** The chosen speed's stagger in all its units. */
+function SpeedLine({ point, system }: { point: SpeedPoint | null, system: UnitSystem }) {
+  if (!point) return <p className="fine" role="status">No figures at this speed: a channel cannot be computed here.</p>
+  const parts = [
+    `${formatQuantityText(point.staggerDeg, 'angle', system, { sign: true })} crank`,
+    `${formatQuantityText(point.staggerDistributorDeg, 'distributorAngle', system, { sign: true, decimals: 2 })} distributor`,
+    formatQuantityText(point.staggerMs, 'timeMs', system, { sign: true }),
+    ...(point.plateArcMm === null ? [] : [`${formatQuantityText(point.plateArcMm, 'arc', system, { sign: true })} on the plate`]),
+  ]
+  return <p className="fine speedline">Stagger, plus: the backup later. {parts.join(' · ')}</p>
+}
