@@ -31,7 +31,7 @@ export const sheet = (change: Partial<ScenarioSheet> = {}): ScenarioSheet => ({
   propeller: { kind: 'fixedPitch', governedRpm: null, pitches: [{ name: 'climb', rpm: 2780, kw: 50 }] },
   runUpRpm: 1700,
   manifold: { idleKpa: 38, runUpKpa: 62, fullKpa: 97 },
-  rotor: { terminalWidthDeg: 6, rotorWidthDeg: 14, phasedAtDeg: 15, backupPhasedAtDeg: 15, sparkDurationMs: 1.2, mechanicalCarriesRotor: true, plateRadiusMm: 36 },
+  rotor: { terminalWidthDeg: 6, rotorWidthDeg: 14, phasedAtDeg: 12, backupPhasedAtDeg: 12, sparkDurationMs: 1.2, mechanicalCarriesRotor: true, plateRadiusMm: 36 },
   tolerances: { timingCheckDeg: 1, benchDeg: 0.5 },
   notes: '',
   ...change,
