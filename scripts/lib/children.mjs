@@ -7,6 +7,9 @@ import { descendantsOf, isGroupAlive, isSameAlive } from './processes.mjs'
 const TAIL_CHARACTERS = 20_000
 const GRACE_MS = 10_000
 
+/** The kernel ends a killed process a moment after the signal. */
+const KILLED_MS = 2_000
+
 /** Every process group started here and not yet ended. @type {Set<number>} */
 const groups = new Set()
 
@@ -39,20 +42,24 @@ export async function endGroup(group, graceMs = GRACE_MS) {
   if (!group) return
   const below = descendantsOf(group)
   const lives = () => isGroupAlive(group) || below.some(isSameAlive)
-  signalGroup(group, 'SIGTERM')
-  for (const until = Date.now() + graceMs; lives() && Date.now() < until;) await sleep(25)
-  if (isGroupAlive(group)) signalGroup(group, 'SIGKILL')
-  for (const each of below) if (isSameAlive(each)) process.kill(Number(each.split(':')[0]), 'SIGKILL')
+  const settle = async (/** @type {number} */ ms) => {
+    for (const until = Date.now() + ms; lives() && Date.now() < until;) await sleep(25)
+  }
+  signalTo(-group, 'SIGTERM')
+  await settle(graceMs)
+  if (isGroupAlive(group)) signalTo(-group, 'SIGKILL')
+  for (const each of below) if (isSameAlive(each)) signalTo(Number(each.split(':')[0]), 'SIGKILL')
+  await settle(KILLED_MS)
   groups.delete(group)
 }
 
 /**
- * @param {number} group
+ * @param {number} pid negative for a whole group
  * @param {NodeJS.Signals} signal
  */
-function signalGroup(group, signal) {
+function signalTo(pid, signal) {
   try {
-    process.kill(-group, signal)
+    process.kill(pid, signal)
   } catch {
     // Gone already.
   }
