@@ -52,7 +52,7 @@ const dot = (a: readonly number[], b: readonly number[]): number => a.reduce((to
  * @throws CalcError on `points.i.sparkDeg`, `points.i.torque`, or on `points` when there are fewer than three distinct angles, unless −c₂·span² > 1e-9·max|torque| (the curve has a top), or unless torqueAtMbt > 0
  * @example
  * fitTimingParabola([{ sparkDeg: 20, torque: 194 }, { sparkDeg: 30, torque: 200 }, { sparkDeg: 40, torque: 194 }]).mbtDeg // → 30
- * fitTimingParabola([{ sparkDeg: 20, torque: 194 }, { sparkDeg: 30, torque: 200 }, { sparkDeg: 40, torque: 194 }]).curvaturePerDeg2 // → 0.0003
+ * fitTimingParabola([{ sparkDeg: 20, torque: 194 }, { sparkDeg: 30, torque: 200 }, { sparkDeg: 40, torque: 194 }]).curvaturePerDeg2 // → 0.00030000
  */
 export const fitTimingParabola = (points: readonly TorquePoint[]): TimingFit => {
   const { sparks, torques } = takePoints(points)

@@ -57,7 +57,7 @@ export const timingTorqueRatio = (parabola: TimingParabola, sparkDeg: number): n
  * @param point.ratio brake torque there over brake torque at MBT, 0 … 1
  * @throws CalcError on `mbtDeg`, `sparkDeg` or `ratio`
  * @example
- * curvatureFromPoint({ mbtDeg: 31, sparkDeg: 21, ratio: 0.97 }) // → 0.0003
+ * curvatureFromPoint({ mbtDeg: 31, sparkDeg: 21, ratio: 0.97 }) // → 0.00030000
  */
 export const curvatureFromPoint = (point: CurvaturePoint): number => {
   const members = membersOf(point)
