@@ -44,13 +44,13 @@ export async function createEngine(_before: ActionState<EngineDto>, form: FormDa
   }, form)
 }
 
-/** The engine form; `version` is the one it was filled from. A newer one comes back as the conflict. */
+/** The engine form; `version` is the one it was filled from. A newer one comes back as the conflict, and `over` names the one to save over. */
 export async function updateEngine(id: string, _before: ActionState<EngineDto>, form: FormData): Promise<ActionState<EngineDto>> {
   return runAction(async () => {
     const actor = await touchActor()
     const values = formValues(form)
     const base = await getEngine(actor, id)
-    const saved = await update(actor, id, { version: Number(values.version) || 1, ...readForm(values, actor, base) })
+    const saved = await update(actor, id, { version: Number(values.over ?? values.version) || 1, ...readForm(values, actor, base) })
     refresh()
     return saved
   }, form)

@@ -8,7 +8,7 @@ import type { ReadyScenario } from './ready-scenario'
 import type { Engine, Scenario } from './scenario-types'
 import { channelNames, curveSamples, perChannel } from './speed-points'
 
-export const displacementCc = ({ cylinders, boreMm, strokeMm }: Engine): number => (cylinders * Math.PI * boreMm ** 2 * strokeMm) / 4000
+export const displacementCc = ({ cylinders, boreMm, strokeMm }: Pick<Engine, 'cylinders' | 'boreMm' | 'strokeMm'>): number => (cylinders * Math.PI * boreMm ** 2 * strokeMm) / 4000
 
 /** kW to Nm at a speed: 60 000 / (2π). */
 const nmPerKwRpm = 30_000 / Math.PI
