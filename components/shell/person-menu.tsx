@@ -54,7 +54,7 @@ export function PersonMenu({ person, theme, items, signOut, setUnitSystem, switc
   }
   return (
     <details className="menu" ref={box} onKeyDown={onKeyDown}>
-      <summary>{person.name}<span className="role">, {person.role}</span><DownGlyph /></summary>
+      <summary><span>{person.name}<span className="role">, {person.role}</span></span><DownGlyph /></summary>
       <div className="pane">
         <nav className="only-n" aria-label="Pages">{items.map((item) => <Link key={item.href} href={item.href}>{item.label}</Link>)}</nav>
         <p className="fine">{person.shopName}, {person.role}</p>

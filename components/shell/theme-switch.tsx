@@ -9,7 +9,7 @@ interface ThemeSwitchProps {
   setTheme: (formData: FormData) => Promise<void>
 }
 
-const words: Record<Theme, string> = { system: 'As the system', light: 'Light', dark: 'Dark' }
+const words: Record<Theme, string> = { system: 'System', light: 'Light', dark: 'Dark' }
 
 function turnTo(theme: Theme) {
   document.cookie = `${themeCookie}=${theme}; path=/; max-age=${themeMaxAge}; samesite=lax`

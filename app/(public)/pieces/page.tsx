@@ -4,6 +4,7 @@ import { ControlPieces } from '@/components/pieces/control-pieces'
 import { DrawingPieces } from '@/components/pieces/drawing-pieces'
 import { FieldPieces } from '@/components/pieces/field-pieces'
 import { VerdictPieces } from '@/components/pieces/verdict-pieces'
+import { ShellPieces } from '@/components/pieces/shell-pieces'
 import { PageHead } from '@/components/shell/page-head'
 
 export const metadata: Metadata = { title: 'Pieces and states' }
@@ -13,6 +14,7 @@ export default function PiecesPage() {
   if (process.env.NODE_ENV === 'production') notFound()
   return (
     <>
+      <ShellPieces />
       <PageHead over="For developers: every piece once, in each state" title="Pieces and states" />
       <main id="main" tabIndex={-1}>
         <div className="body cols desk:grid-cols-3 border-t border-line pt-4">
