@@ -19,7 +19,7 @@ const verdictClass = { outside: 'outside', close: 'close', within: '' } as const
 export const FindingRow = memo(function FindingRow({ finding, system, stale, reason }: { finding: Finding, system: UnitSystem, stale: boolean, reason?: string }) {
   const value = findingValue(finding, system)
   const origin = limitOrigin[defaultLimits[finding.limitId].from]
-  const cited = finding.sourceIds.map((id) => sources[id]).filter((source) => source !== undefined)
+  const cited = finding.sourceIds.map((id) => sources[id]).filter((source) => source !== undefined).map(sourceWords).filter((words) => words !== origin)
   return (
     <li className={`find ${verdictClass[finding.verdict]}${stale ? ' stale' : ''}`} data-finding={finding.id}>
       <VerdictMark verdict={finding.verdict} wordless />
@@ -29,7 +29,7 @@ export const FindingRow = memo(function FindingRow({ finding, system, stale, rea
       <LimitStrip value={finding.value} verdict={finding.verdict} {...(finding.sense === 'atLeast' ? { atLeast: finding.limit } : { atMost: finding.limit })} />
       <span className="why">
         {stale ? <em>As it was before the field that cannot be read. </em> : null}
-        {findingSentence(finding, system)} <span className="srcs">Limit: {origin}. {cited.map(sourceWords).join('; ')}</span>
+        {findingSentence(finding, system)} <span className="srcs">Limit: {[origin, ...cited].join('; ')}</span>
         {reason ? <span className="reason">Released with this reason: {reason}</span> : null}
       </span>
     </li>

@@ -168,13 +168,19 @@ function RegisterLedger({ parts, stale, system }: LedgersProps) {
 /** Figures beside the drawings, each group with the reason where it is withheld. */
 export const ResultLedgers = memo(function ResultLedgers(props: LedgersProps) {
   return (
-    <div className="leds">
-      <PowerLedger {...props} />
-      <DeadCylinderLedger {...props} />
-      <RunUpLedger {...props} />
-      <PropellerLedger {...props} />
-      <ProofLedger {...props} />
-      <RegisterLedger {...props} />
-    </div>
+    <>
+      <div className="leds">
+        <PowerLedger {...props} />
+        <DeadCylinderLedger {...props} />
+        <RegisterLedger {...props} />
+      </div>
+      <div className="leds wide-2">
+        <RunUpLedger {...props} />
+        <PropellerLedger {...props} />
+      </div>
+      <div className="leds wide-2">
+        <ProofLedger {...props} />
+      </div>
+    </>
   )
 })
