@@ -13,17 +13,15 @@ export const metadata: Metadata = { title: 'Pieces and states' }
 export default function PiecesPage() {
   if (process.env.NODE_ENV === 'production') notFound()
   return (
-    <>
+    <main id="main" tabIndex={-1}>
       <ShellPieces />
       <PageHead over="For developers: every piece once, in each state" title="Pieces and states" />
-      <main id="main" tabIndex={-1}>
-        <div className="body cols desk:grid-cols-3 border-t border-line pt-4">
-          <div><VerdictPieces /></div>
-          <div><FieldPieces /></div>
-          <div><ControlPieces /></div>
-        </div>
-        <div className="body"><DrawingPieces /></div>
-      </main>
-    </>
+      <div className="body cols desk:grid-cols-3 border-t border-line pt-4">
+        <div><VerdictPieces /></div>
+        <div><FieldPieces /></div>
+        <div><ControlPieces /></div>
+      </div>
+      <div className="body"><DrawingPieces /></div>
+    </main>
   )
 }
