@@ -1,3 +1,4 @@
+import { randomUUID } from 'node:crypto'
 import { beforeAll, expect, test } from 'vitest'
 import { archiveEngine } from '@/lib/data/engines/archive-engine'
 import { listEngines } from '@/lib/data/engines/list-engines'
@@ -24,6 +25,8 @@ test.each([
   [{ search: '%' }, ['S10']],
   [{ search: '_' }, ['S9']],
   [{ search: 'a_b' }, ['S9']],
+  [{ search: '00% ' }, ['S10']],
+  [{ search: 'o\\d' }, []],
   [{ search: '\\' }, ['S2']],
   [{ search: "o'd" }, ['S2']],
   [{ search: '  SIX   s1 ' }, ['S1', 'S10']],
@@ -46,4 +49,7 @@ test('an address that is none of ours is told as a sentence', async () => {
   for (const cursor of ['nonsense', '', btoa('["code"]'), btoa('["name","a","b"]'), btoa('[]'), btoa('null')]) {
     expect((await refusalOf(listEngines(designer, { cursor }))).fieldErrors).toEqual({ cursor: 'This address does not lead to a page of the list.' })
   }
+  const ofCode = Buffer.from(JSON.stringify(['code', 'S1', randomUUID()])).toString('base64url')
+  expect((await listEngines(designer, { sort: 'code', cursor: ofCode })).rows.length).toBeGreaterThan(0)
+  expect((await refusalOf(listEngines(designer, { sort: 'name', cursor: ofCode }))).fieldErrors).toHaveProperty('cursor')
 })

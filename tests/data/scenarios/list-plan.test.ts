@@ -25,7 +25,7 @@ const walked = /Seq Scan on (scenarios|revisions)/
 test.each([
   {}, { sort: 'title' }, { sort: 'code' }, { sort: 'outside' },
   { state: 'archived' }, { state: 'archived', sort: 'title' }, { state: 'released' }, { state: 'outside' }, { state: 'outside', sort: 'outside' },
-  { search: 'winter' }, { search: 'nothing like it' }, { search: 'trial 17', sort: 'title' }, { search: '-9', state: 'outside' },
+  { search: 'winter' }, { search: 'nothing like it' }, { search: 'trial 17', sort: 'title' }, { search: '-9', state: 'outside' }, { search: 'x1' }, { search: 'q z' },
 ] as ScenarioListQuery[])('10 000 scenarios, %j: an index leads to every page', async (query) => {
   for (const actor of [cast.author, cast.actors.builder]) {
     let cursor: string | undefined
