@@ -1,0 +1,66 @@
+import AxeBuilder from '@axe-core/playwright'
+import { expect, test, type Page } from '@playwright/test'
+import { pageOf, watch } from './support/people'
+
+async function judge(page: Page): Promise<void> {
+  const { violations } = await new AxeBuilder({ page }).withTags(['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa', 'best-practice']).analyze()
+  expect(violations.map(({ id, nodes }) => `${id}: ${nodes.slice(0, 3).map((node) => node.target.join(' ')).join(' | ')}`)).toEqual([])
+}
+
+/** Each page the demo has, by the links it offers. */
+async function pagesOf(page: Page): Promise<string[]> {
+  const firstLink = async (list: string, pattern: RegExp) => {
+    await page.goto(list)
+    const hrefs = await page.locator('main a').evaluateAll((links) => links.map((link) => link.getAttribute('href') ?? ''))
+    const found = hrefs.find((href) => pattern.test(href))
+    if (!found) throw new Error(`no link like ${pattern} on ${list}`)
+    return found
+  }
+  const scenario = await firstLink('/scenarios', /^\/scenarios\/[0-9a-f-]{36}/)
+  const engine = await firstLink('/engines', /^\/engines\/[0-9a-f-]{36}/)
+  const plan = await firstLink('/plans', /^\/plans\/[0-9a-f-]{36}/)
+  return [
+    '/scenarios', '/scenarios?search=nothing+like+this', '/scenarios/new', scenario, `${scenario}/revisions`, `${scenario}/revisions/1`, `${scenario}/release`,
+    '/engines', '/engines/new', engine, '/plans', plan, '/nowhere',
+  ]
+}
+
+for (const colorScheme of ['light', 'dark'] as const) {
+  test(`nothing to mend on any page behind sign-in, ${colorScheme}`, async ({ browser }) => {
+    test.setTimeout(180_000)
+    const page = await pageOf(browser, 'designer', { colorScheme, reducedMotion: 'reduce' })
+    const clean = watch(page)
+    for (const path of await pagesOf(page)) {
+      await page.goto(path)
+      await page.waitForLoadState('networkidle')
+      await test.step(path, () => judge(page))
+    }
+    clean()
+    await page.context().close()
+  })
+  test(`nothing to mend on the public pages, ${colorScheme}`, async ({ browser }) => {
+    const context = await browser.newContext({ colorScheme })
+    const page = await context.newPage()
+    const clean = watch(page)
+    for (const path of ['/', '/sign-in', '/sign-up', '/nowhere']) {
+      await page.goto(path)
+      await test.step(path, () => judge(page))
+    }
+    await page.goto('/sign-in')
+    await page.getByRole('button', { name: 'Sign in' }).click()
+    await test.step('sign-in with faults', () => judge(page))
+    clean()
+    await context.close()
+  })
+}
+
+test('nothing scrolls sideways at 360 px', async ({ browser }) => {
+  test.setTimeout(120_000)
+  const page = await pageOf(browser, 'designer', { viewport: { width: 360, height: 780 } })
+  for (const path of await pagesOf(page)) {
+    await page.goto(path)
+    const over = await page.evaluate(() => document.documentElement.scrollWidth - document.documentElement.clientWidth)
+    expect(over, path).toBeLessThanOrEqual(0)
+  }
+  await page.context().close()
+})
