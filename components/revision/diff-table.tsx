@@ -17,33 +17,41 @@ export interface DiffRow {
   under?: string | null
   left: ReactNode
   right: ReactNode
-  /** 'same', a signed number, or nothing to say. */
+  /** 'same', a signed number, or null where there is no number to give. */
   difference: string | null
   isSame: boolean
-  /** Texts of several lines stand at the left. */
+  /** Texts of several lines stand at the top. */
   isBlock?: boolean
+}
+
+export interface DiffGroup {
+  title: string | null
+  rows: readonly DiffRow[]
 }
 
 function Head({ label, digit }: DiffColumn) {
   return <th scope="col" className="r">{digit === null ? label : <><span className="digit" aria-hidden="true">{digit}</span><span className="sr">{label}</span></>}</th>
 }
 
-/** Two versions side by side with a column for the difference; on a phone the label stands over its figures. */
-export function DiffTable({ caption, columns, rows }: { caption: string, columns: [DiffColumn, DiffColumn], rows: readonly DiffRow[] }) {
+/** Two versions side by side with a column for the difference. */
+export function DiffTable({ caption, columns, groups }: { caption: string, columns: readonly [DiffColumn, DiffColumn], groups: readonly DiffGroup[] }) {
   return (
     <table className="led diff">
       <caption className="sr">{caption}</caption>
       <thead><tr><td /><Head {...columns[0]} /><Head {...columns[1]} /><th scope="col" className="r">difference</th></tr></thead>
-      <tbody>
-        {rows.map((row) => (
-          <tr key={row.key} className={clsx(row.isBlock && 'tall') || undefined}>
-            <th scope="row">{row.channel ? <><ChannelChip channel={letterOf(row.channel)} /> </> : null}{row.label}{row.under ? <small className="block">{row.under}</small> : null}</th>
-            <td className="r">{row.left}</td>
-            <td className="r">{row.right}</td>
-            <td className="r df">{row.isSame ? <small>same</small> : row.difference ?? <small>changed</small>}</td>
-          </tr>
-        ))}
-      </tbody>
+      {groups.map(({ title, rows }, i) => (
+        <tbody key={title ?? i}>
+          {title === null ? null : <tr className="gh"><th scope="rowgroup" colSpan={4}>{title}</th></tr>}
+          {rows.map((row) => (
+            <tr key={row.key} className={clsx(row.isBlock && 'tall') || undefined}>
+              <th scope="row">{row.channel ? <><ChannelChip channel={letterOf(row.channel)} spoken /> </> : null}{row.label}{row.under ? <small>{row.under}</small> : null}</th>
+              <td className="r">{row.left}</td>
+              <td className="r">{row.right}</td>
+              <td className="r df">{row.isSame || row.difference === 'same' ? <small>same</small> : row.difference ?? <small>changed</small>}</td>
+            </tr>
+          ))}
+        </tbody>
+      ))}
     </table>
   )
 }

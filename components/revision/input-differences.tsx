@@ -36,11 +36,14 @@ export function InputDifferences({ fields, left, right, system, all = false, cap
   return (
     <DiffTable
       caption={caption} columns={columns}
-      rows={rows.map((row) => ({
-        key: row.key, channel: row.channel, label: row.label,
-        left: <Cell text={row.left} row={row} />, right: <Cell text={row.right} row={row} />,
-        difference: row.isSame ? 'same' : row.difference, isSame: row.isSame, isBlock: row.layout === 'block',
-      }))}
+      groups={[{
+        title: null,
+        rows: rows.map((row) => ({
+          key: row.key, channel: row.channel, label: row.label,
+          left: <Cell text={row.left} row={row} />, right: <Cell text={row.right} row={row} />,
+          difference: row.difference, isSame: row.isSame, isBlock: row.layout === 'block',
+        })),
+      }]}
     />
   )
 }

@@ -18,4 +18,4 @@ const alone: Record<string, string> = {
 }
 
 /** The label of a field that stands by itself; the channel is told beside it. */
-export const longLabel = ({ name, label }: Pick<FieldDef, 'name' | 'label'>): string => alone[name.replace(/^(primary|backup)\./, '')] ?? label
+export const longLabel = ({ name, label }: Pick<FieldDef, 'name' | 'label'>): string => alone[name.replace(/^(primary|backup|engine)\./, '')] ?? label
