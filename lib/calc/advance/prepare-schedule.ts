@@ -1,6 +1,8 @@
 import { CalcError } from '../calc-error'
+import { mustAscend } from '../validate/ascending'
 import { takeNumber } from '../validate/number'
 import { takeNumbers } from '../validate/numbers'
+import { takePairs } from '../validate/pairs'
 import { takeChoice, takeList, takeRecord } from '../validate/shape'
 import type { Schedule } from './advance-types'
 import { compileFormula } from './formula'
@@ -20,19 +22,6 @@ export interface PreparedSchedule {
 const kinds: readonly Schedule['kind'][] = ['fixed', 'mechanical', 'table', 'map', 'formula']
 const speed = { unit: 'rpm', min: 0 }
 const advance = { unit: 'deg' }
-
-/** Throws on the first entry that is not above the one before it. */
-const mustAscend = (values: readonly number[], unit: string, fieldOf: (i: number) => string, nameOf: (i: number) => string): void => {
-  for (let i = 1; i < values.length; i += 1) {
-    const before = values[i - 1] ?? 0
-    const value = values[i] ?? 0
-    if (value > before) continue
-    throw new CalcError({
-      field: fieldOf(i), value, limit: `> ${before}`, unit,
-      message: `${nameOf(i)} must be above the one before it, ${before} ${unit}; ${value} ${unit} was given.`,
-    })
-  }
-}
 
 const flat = { usesMap: false, isSampled: false }
 
@@ -55,13 +44,7 @@ const mechanical = (members: Record<string, unknown>, field: string): PreparedSc
 
 const table = (members: Record<string, unknown>, field: string): PreparedSchedule => {
   const points = takeList(members.points, `${field}.points`, 'The advance table', 1)
-  const rpm: number[] = []
-  const deg: number[] = []
-  for (let i = 0; i < points.length; i += 1) {
-    const point = takeRecord(points[i], `${field}.points.${i}`, `Point ${i + 1} of the advance table`)
-    rpm.push(takeNumber(point.rpm, `${field}.points.${i}.rpm`, { ...speed, name: () => `The speed of point ${i + 1}` }))
-    deg.push(takeNumber(point.deg, `${field}.points.${i}.deg`, { ...advance, name: () => `The advance of point ${i + 1}` }))
-  }
+  const [rpm, deg] = takePairs(points, `${field}.points`, 'Point', { key: 'rpm', ...speed, nameOf: (n) => `The speed of point ${n}` }, { key: 'deg', ...advance, nameOf: (n) => `The advance of point ${n}` })
   mustAscend(rpm, 'rpm', (i) => `${field}.points.${i}.rpm`, (i) => `The speed of point ${i + 1}`)
   return overSpeed(rpm, deg)
 }

@@ -1,6 +1,6 @@
 import { CalcError } from '../calc-error'
-import { takeNumber } from '../validate/number'
-import { takeList, takeRecord } from '../validate/shape'
+import { takePairs } from '../validate/pairs'
+import { takeList } from '../validate/shape'
 
 export interface TorquePoint { readonly sparkDeg: number, readonly torque: number }
 
@@ -18,17 +18,10 @@ export interface TimingFit {
   readonly mbtSeDeg: number | null
 }
 
-const takePoints = (points: unknown): { sparks: number[], torques: number[] } => {
-  const list = takeList(points, 'points', 'The list of torque readings', 3)
-  const sparks: number[] = []
-  const torques: number[] = []
-  for (let i = 0; i < list.length; i += 1) {
-    const point = takeRecord(list[i], `points.${i}`, `Torque reading ${i + 1}`)
-    sparks.push(takeNumber(point.sparkDeg, `points.${i}.sparkDeg`, { name: () => `The spark of reading ${i + 1}`, unit: 'deg' }))
-    torques.push(takeNumber(point.torque, `points.${i}.torque`, { name: () => `The torque of reading ${i + 1}`, unit: '' }))
-  }
-  return { sparks, torques }
-}
+const takePoints = (points: unknown): [number[], number[]] => takePairs(
+  takeList(points, 'points', 'The list of torque readings', 3), 'points', 'Torque reading',
+  { key: 'sparkDeg', unit: 'deg', nameOf: (n) => `The spark of reading ${n}` }, { key: 'torque', unit: '', nameOf: (n) => `The torque of reading ${n}` },
+)
 
 const refuse = (points: unknown, limit: string, message: string): CalcError => new CalcError({ field: 'points', value: points, limit, unit: '', message })
 
@@ -55,7 +48,7 @@ const dot = (a: readonly number[], b: readonly number[]): number => a.reduce((to
  * fitTimingParabola([{ sparkDeg: 20, torque: 194 }, { sparkDeg: 30, torque: 200 }, { sparkDeg: 40, torque: 194 }]).curvaturePerDeg2 // → 0.00030000
  */
 export const fitTimingParabola = (points: readonly TorquePoint[]): TimingFit => {
-  const { sparks, torques } = takePoints(points)
+  const [sparks, torques] = takePoints(points)
   const count = sparks.length
   if (new Set(sparks).size < 3) throw refuse(points, 'three distinct angles', 'The torque readings must lie at three different spark angles at least: fewer do not make a parabola.')
 

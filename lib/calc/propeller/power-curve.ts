@@ -1,9 +1,11 @@
 import { CalcError } from '../calc-error'
 import { placeOn, valueAt } from '../shared/interpolate'
+import { describeValue } from '../validate/describe'
+import { mustAscend } from '../validate/ascending'
 import { takeNumber } from '../validate/number'
+import { takePairs } from '../validate/pairs'
 import { finiteResult } from '../validate/result'
 import { takeList, takeRecord } from '../validate/shape'
-import { describeValue } from '../validate/describe'
 
 /** Full-throttle power at a speed. */
 export interface PowerCurvePoint { readonly rpm: number, readonly kw: number }
@@ -21,17 +23,15 @@ export interface PreparedCurve {
   readonly kwAt: (rpm: number) => number
 }
 
+const speedName = (place: number): string => `The speed of point ${place} of the power curve`
+
 export const takePowerCurve = (value: unknown): PreparedCurve => {
   const list = takeList(value, 'powerCurve', 'The power curve', 2)
-  const rpm: number[] = []
-  const kw: number[] = []
-  for (let i = 0; i < list.length; i += 1) {
-    const point = takeRecord(list[i], `powerCurve.${i}`, `Point ${i + 1} of the power curve`)
-    const before = rpm[i - 1]
-    const range = before === undefined ? { min: 0 } : { above: before }
-    rpm.push(takeNumber(point.rpm, `powerCurve.${i}.rpm`, { name: () => `The speed of point ${i + 1} of the power curve`, unit: 'rpm', ...range }))
-    kw.push(takeNumber(point.kw, `powerCurve.${i}.kw`, { name: () => `The power of point ${i + 1} of the power curve`, unit: 'kW', min: 0 }))
-  }
+  const [rpm, kw] = takePairs(
+    list, 'powerCurve', 'Power curve point',
+    { key: 'rpm', unit: 'rpm', min: 0, nameOf: speedName }, { key: 'kw', unit: 'kW', min: 0, nameOf: (n) => `The power of point ${n} of the power curve` },
+  )
+  mustAscend(rpm, 'rpm', (i) => `powerCurve.${i}.rpm`, (i) => speedName(i + 1))
   return { rpm, fromRpm: rpm[0] ?? 0, toRpm: rpm[rpm.length - 1] ?? 0, kwAt: (speed) => valueAt(kw, placeOn(rpm, speed)) }
 }
 

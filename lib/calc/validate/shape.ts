@@ -1,7 +1,7 @@
 import { CalcError } from '../calc-error'
 import { describeValue } from './describe'
 
-const isRecord = (value: unknown): value is Record<string, unknown> =>
+export const isRecord = (value: unknown): value is Record<string, unknown> =>
   typeof value === 'object' && value !== null && !Array.isArray(value)
 
 /**

@@ -12,4 +12,5 @@ it('without its parser a formula is an error that can be told from others; once 
   expect(error.details()).toMatchObject({ field: 'channel.schedule.expression', code: 'formulaParserNotLoaded', value: 'rpm / 100' })
   await loadFormulaParser()
   expect(compute()).toBe(15)
-})
+  // Loading the parser's many files may take seconds on a busy machine.
+}, 60_000)
