@@ -8,7 +8,7 @@ import { inData } from './paths.mjs'
  * What is remembered of a cluster between runs, in .data/<name>.json. `ready` turns true once its database exists;
  * `seeded` once the demo was laid in it, so that a demo somebody removed does not come back.
  * @typedef {{ folder: string, port: number, password: string, ready: boolean, seeded?: boolean }} ClusterInfo
- * @typedef {'pg' | 'pg-test'} ClusterName pg for people's records, pg-test for tests and measurements
+ * @typedef {'pg' | 'pg-test' | 'pg-soak'} ClusterName pg for people's records, pg-test for tests and measurements, pg-soak for runs that kill it
  */
 
 export const USER = 'app'

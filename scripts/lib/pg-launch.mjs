@@ -33,7 +33,7 @@ export async function launch(name, info) {
     info.port = await freePort(info.port)
     writeInfo(name, info)
     const from = fs.statSync(log).size
-    const options = [`-p ${info.port}`, '-c listen_addresses=127.0.0.1', "-c unix_socket_directories=''", '-c max_connections=60', ...(name === 'pg' ? [] : FAST_AND_LOSS_PRONE)]
+    const options = [`-p ${info.port}`, '-c listen_addresses=127.0.0.1', "-c unix_socket_directories=''", '-c max_connections=60', ...(name === 'pg-test' ? FAST_AND_LOSS_PRONE : [])]
     const started = runAs(owner, programFor(info.folder, 'pg_ctl'), ['start', '-D', info.folder, '-w', '-t', String(START_SECONDS), '-l', log, '-o', options.join(' ')])
     if (started.ok) return
     const written = fs.readFileSync(log).subarray(from).toString('utf8') || started.err
