@@ -15,9 +15,13 @@ export async function outcomeOf(call: () => unknown): Promise<Outcome> {
     if (digestOf(thrown) === 'NEXT_HTTP_ERROR_FALLBACK;404') return { code: 'notFound' }
     const place = redirectPlace(thrown)
     if (place === null) throw thrown
-    return { code: place.startsWith('/sign-in?') ? 'signedOut' : 'done', value: place }
+    return { code: codeOfPlace(place), value: place }
   }
 }
+
+/** A single button's action tells what went wrong in the address it leads back to. */
+const codeOfPlace = (place: string) =>
+  (place.startsWith('/sign-in?') ? 'signedOut' : new URL(place, 'http://here.invalid').searchParams.get('problem') ?? 'done')
 
 const isRefusal = (value: unknown): value is { ok: false, code?: string } =>
   typeof value === 'object' && value !== null && 'ok' in value && value.ok === false

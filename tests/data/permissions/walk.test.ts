@@ -78,7 +78,7 @@ describe('every door of the server', () => {
       if (code !== 'done') expect(await fingerprint(world.orm), `${who} was refused, and rows changed`).toBe(before)
       if (actor === world.neighbour || actor === world.stranger || !actor) expect(leaks(value), who).toEqual([])
     }
-  })
+  }, 120_000) // about ten calls each, some of which hash a password or evaluate a whole scenario
 })
 
 test('an id that is none is not found, never an error of the database', async () => {
