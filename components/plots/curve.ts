@@ -22,10 +22,9 @@ export const jumpsOf = (points: readonly CurvePoint[]): number[] => points.flatM
 
 /** Where the falling trend leaves the rising one: runs of points that differ, with the points they start and end at. */
 export function fallingRuns(rising: readonly CurvePoint[], falling: readonly CurvePoint[]): CurvePoint[][] {
-  const differs = falling.map(({ rpm, deg }) => {
-    const other = degAt(rising, rpm)
-    return other === null || Math.abs(other - deg) > 1e-6
-  })
+  // At a jump the rising curve has two values: either is on it.
+  const near = (one: number | null, other: number) => one !== null && Math.abs(one - other) < 1e-6
+  const differs = falling.map(({ rpm, deg }) => !near(degAt(rising, rpm), deg) && !rising.some((point) => point.rpm === rpm && near(point.deg, deg)))
   const runs: CurvePoint[][] = []
   let run: CurvePoint[] = []
   falling.forEach((point, index) => {

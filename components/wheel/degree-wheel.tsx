@@ -1,5 +1,6 @@
 'use client'
 
+import { usePhone } from '@/components/ui/use-phone'
 import { useWidth } from '@/components/ui/use-width'
 import { sizeFor, type WheelSize } from './sizes'
 import { WheelDrawing, type WheelDrawingProps } from './wheel-drawing'
@@ -17,6 +18,7 @@ const servedCrop = 328
 
 export function DegreeWheel({ size = 'auto', width, ...rest }: DegreeWheelProps) {
   const [ref, found] = useWidth<HTMLDivElement>()
+  const phone = usePhone()
   if (size !== 'auto') return <div className="wheel"><WheelDrawing {...rest} size={size} width={width ?? (size === 'full' ? servedFull : size === 'crop' ? servedCrop : 238)} /></div>
   const given = found === null ? null : Math.min(found, width ?? servedFull)
   return (
@@ -26,7 +28,7 @@ export function DegreeWheel({ size = 'auto', width, ...rest }: DegreeWheelProps)
           <div className="only-w"><WheelDrawing {...rest} size="full" width={width ?? servedFull} /></div>
           <div className="only-n"><WheelDrawing {...rest} size="crop" width={servedCrop} /></div>
         </>
-      ) : <WheelDrawing {...rest} size={sizeFor(given)} width={given} />}
+      ) : <WheelDrawing {...rest} size={sizeFor(given, phone)} width={given} />}
     </div>
   )
 }

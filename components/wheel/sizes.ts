@@ -18,8 +18,8 @@ const boxes = {
   mini: { left: -186, top: -216, width: 372, height: 290 },
 } as const
 
-/** Full from 340 px; below it the lower half is left out; below 300 few words in larger type. */
-export const sizeFor = (widthPx: number): WheelSize => (widthPx >= 340 ? 'full' : widthPx >= 300 ? 'crop' : 'mini')
+/** Full from 340 px; on phones and below it the lower half is left out; below 300 few words in larger type. */
+export const sizeFor = (widthPx: number, phone = false): WheelSize => (widthPx < 300 ? 'mini' : phone || widthPx < 340 ? 'crop' : 'full')
 
 /** The drawing for a width: units a pixel decide the type, so that it never falls below 13 px. */
 export function wheelView(size: WheelSize, widthPx: number): WheelView {

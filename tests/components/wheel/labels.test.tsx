@@ -34,7 +34,8 @@ describe('labels of the wheel', () => {
   })
 
   test('the narrower the drawing the fewer the words, and no type below 13 px', () => {
-    expect([520, 340, 339, 300, 299, 180].map(sizeFor)).toEqual(['full', 'full', 'crop', 'crop', 'mini', 'mini'])
+    expect([520, 340, 339, 300, 299, 180].map((width) => sizeFor(width))).toEqual(['full', 'full', 'crop', 'crop', 'mini', 'mini'])
+    expect([520, 358, 299].map((width) => sizeFor(width, true))).toEqual(['crop', 'crop', 'mini'])
     for (const width of [180, 238, 299, 300, 328, 340, 366, 520]) {
       const view = wheelView(sizeFor(width), width)
       expect((view.font.small * width) / view.width).toBeGreaterThanOrEqual(12.9)
