@@ -172,14 +172,14 @@ export const ResultLedgers = memo(function ResultLedgers(props: LedgersProps) {
       <div className="leds">
         <PowerLedger {...props} />
         <DeadCylinderLedger {...props} />
-        <RegisterLedger {...props} />
+        <div>
+          <ProofLedger {...props} />
+          <RegisterLedger {...props} />
+        </div>
       </div>
       <div className="leds wide-2">
         <RunUpLedger {...props} />
         <PropellerLedger {...props} />
-      </div>
-      <div className="leds wide-2">
-        <ProofLedger {...props} />
       </div>
     </>
   )

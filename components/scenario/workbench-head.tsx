@@ -2,6 +2,7 @@
 
 import { useEffect, useState, type ReactNode } from 'react'
 import { Button, ButtonLink } from '@/components/ui/button'
+import { TimeAt } from '@/components/lists/time-at'
 import { PageHead } from '@/components/shell/page-head'
 import type { ScenarioResult } from '@/lib/calc/scenario/result-types'
 import type { UnitSystem } from '@/lib/units'
@@ -37,8 +38,6 @@ function useOffline(): boolean {
   return offline
 }
 
-const savedWhen = (iso: string) => `${iso.slice(0, 10)} ${iso.slice(11, 16)} UTC`
-
 /** Head of the working sheet: which revision, what it comes to, what can be done with it. */
 export function WorkbenchHead({ scenario, title, saved, dirty, saving, formId, result, system, stale, more }: WorkbenchHeadProps) {
   const offline = useOffline()
@@ -49,7 +48,7 @@ export function WorkbenchHead({ scenario, title, saved, dirty, saving, formId, r
       <PageHead
         over={(
           <>
-            Scenario {scenario.code} · revision {saved.number} · saved <time dateTime={saved.at}>{savedWhen(saved.at)}</time> by {saved.by}
+            Scenario {scenario.code} · revision {saved.number} · {saved.by}, <TimeAt iso={saved.at} />
             <span className="sheet-state" role="status">{offline ? ' · no connection: saving waits for it' : saving ? ' · saving' : dirty ? ' · changes not saved' : ''}</span>
           </>
         )}
