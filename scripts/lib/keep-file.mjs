@@ -3,6 +3,7 @@ import path from 'node:path'
 
 /**
  * Replaces a small file whole or not at all: a full disk or a kill in the middle leaves the old one.
+ * It keeps its owner, so that one start as root does not lock the usual user out.
  * @param {string} file
  * @param {string} text
  */
@@ -13,6 +14,10 @@ export function writeWhole(file, text) {
     const fd = fs.openSync(part, 'w', 0o600)
     try {
       fs.writeFileSync(fd, text)
+      if (process.getuid?.() === 0) {
+        const { uid, gid } = fs.statSync(fs.existsSync(file) ? file : path.dirname(file))
+        fs.fchownSync(fd, uid, gid)
+      }
       fs.fsyncSync(fd)
     } finally {
       fs.closeSync(fd)

@@ -18,7 +18,7 @@ export async function build({ show = false } = {}) {
   requireSpace(root, 500, 'the build and its cache')
   const hash = sourceHash(root)
   fs.rmSync(stampFile(), { force: true })
-  const outcome = await runToEnd(process.execPath, [inRoot('node_modules', 'next', 'dist', 'bin', 'next'), 'build'], { minutes: 10, show, env: { NODE_ENV: 'production' } })
+  const outcome = await runToEnd(process.execPath, [inRoot('node_modules', 'next', 'dist', 'bin', 'next'), 'build'], { minutes: 20, show, env: { NODE_ENV: 'production' } })
   if (outcome.ok) fs.writeFileSync(stampFile(), hash)
   return outcome
 }

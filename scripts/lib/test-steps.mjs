@@ -34,12 +34,12 @@ export function testSteps(database, say) {
   const node = (/** @type {string[]} */ args, /** @type {number} */ minutes, /** @type {NodeJS.ProcessEnv} */ env = {}) => runToEnd(process.execPath, args, { minutes, env, show: true })
   const npm = (/** @type {string} */ script, /** @type {number} */ minutes) => runToEnd('npm', ['run', '--silent', script], { minutes, show: true })
   return [
-    { name: 'lint', run: async () => countOne(await npm('lint', 4)) },
+    { name: 'lint', run: async () => countOne(await npm('lint', 10)) },
     {
       name: 'typecheck',
       run: async () => {
         if (!runningHere()?.development) clearDevelopmentTypes()
-        return countOne(await npm('typecheck', 4))
+        return countOne(await npm('typecheck', 10))
       },
     },
     {
@@ -49,7 +49,7 @@ export function testSteps(database, say) {
         const outcome = await node([
           inRoot('node_modules', 'vitest', 'vitest.mjs'), 'run', ...PROJECTS.flatMap(({ name }) => ['--project', name]),
           '--reporter=default', '--reporter=json', `--outputFile.json=${report}`,
-        ], 8)
+        ], 15)
         return countVitest(readIfThere(report), outcome, PROJECTS)
       },
     },
@@ -71,13 +71,13 @@ export function testSteps(database, say) {
         await installChromium(say)
         const report = freshReport('e2e.json')
         const outcome = await withSeededDatabase(database, async (url) =>
-          node([inRoot('node_modules', '@playwright', 'test', 'cli.js'), 'test'], 9, { DATABASE_URL: url, E2E_PORT: String(await freePort()), CHROMIUM: chromiumPath() }))
+          node([inRoot('node_modules', '@playwright', 'test', 'cli.js'), 'test'], 20, { DATABASE_URL: url, E2E_PORT: String(await freePort()), CHROMIUM: chromiumPath() }))
         return countPlaywright(readIfThere(report), outcome)
       },
     },
     ...SOAKS.map((name) => ({ name, script: inRoot('scripts', `soak-${name}.mjs`) }))
       .filter(({ script }) => fs.existsSync(script))
-      .map(({ name, script }) => ({ name: `soak:${name}, short`, run: async () => countOne(await node([script, '--short'], 3)) })),
+      .map(({ name, script }) => ({ name: `soak:${name}, short`, run: async () => countOne(await node([script, '--short'], 5)) })),
   ]
 }
 
