@@ -4,11 +4,7 @@ import { useMemo, useState } from 'react'
 import { AdvancePlot } from '@/components/plots/advance-plot'
 import type { AdvanceChannel, SpeedMark } from '@/components/plots/advance-curves'
 import { DegreeWheel } from '@/components/wheel/degree-wheel'
-import { firingSchedule } from '@/lib/calc/angle/firing-schedule'
-import { Withheld } from '@/lib/calc/scenario/part'
-import type { PartName, ScenarioResult, SpeedPoint } from '@/lib/calc/scenario/result-types'
-import type { Engine, Scenario, ScenarioSheet } from '@/lib/calc/scenario/scenario-types'
-import { dependsOnPressure, speedPointAt } from '@/lib/calc/scenario/speed-points'
+import { dependsOnPressure, findSpeedPoint, firingSchedule, type Engine, type PartName, type Scenario, type ScenarioResult, type ScenarioSheet, type SpeedPoint } from '@/lib/calc/live'
 import { formatQuantityText, type UnitSystem } from '@/lib/units'
 import { scheduleKinds } from '@/lib/schemas/scenario-fields'
 import { PartView } from './stale-part'
@@ -44,22 +40,12 @@ function drawnChannels({ parts }: ScenarioResult, sheet: ScenarioSheet): Advance
 const cylindersOf = (engine: Engine) => firingSchedule({ firingOrder: engine.firingOrder, ...(engine.intervalsDeg ? { intervalsDeg: engine.intervalsDeg } : {}) })
   .map(({ cylinder, atDeg }) => ({ label: String(cylinder), atDeg }))
 
-/** Both sparks at a speed; null where a channel cannot be computed there, and the wheel keeps what it can. */
-function pointAt(scenario: Scenario, rpm: number): SpeedPoint | null {
-  try {
-    return speedPointAt(scenario, rpm)
-  } catch (error) {
-    if (error instanceof Withheld) return null
-    throw error
-  }
-}
-
 /** The degree wheel at the chosen speed and the advance curves; the speed axis of the plot chooses. */
 export function TimingDrawings({ scenario, result, deferred, stale, system, name }: TimingDrawingsProps) {
   const { engine, sheet } = scenario
   const [chosen, setChosen] = useState<number | null>(null)
   const rpm = chosen ?? engine.maxRpm
-  const point = useMemo(() => pointAt(scenario, rpm), [scenario, rpm])
+  const point = useMemo(() => findSpeedPoint(scenario, rpm), [scenario, rpm])
   const cylinders = useMemo(() => cylindersOf(engine), [engine])
   const channels = useMemo(() => drawnChannels(deferred, sheet), [deferred, sheet])
   const marks = useMemo(() => speedMarks(scenario), [scenario])

@@ -37,3 +37,13 @@ export { runUpDrop, torqueRatioFromDrop, type RunUpDrop, type RunUpDropInput, ty
 
 export { rotorRegister, type RotorRegister, type RotorRegisterInput } from './rotor/rotor-register'
 export { bestPhasingDeg } from './rotor/best-phasing'
+
+export { defaultLimits, judge, type Limit, type LimitId, type Limits, type LimitUnit, type Verdict } from './limits'
+export { evaluateScenario, inputErrors } from './scenario/evaluate-scenario'
+export { partsStandingOn } from './scenario/dependencies'
+export { rankFindings } from './scenario/findings'
+export { displacementCc } from './scenario/power-parts'
+export type * from './scenario/result-types'
+export type { Engine, MbtProvenance, Pitch, Rotation, Rotor, Scenario, ScenarioSheet } from './scenario/scenario-types'
+export { dependsOnPressure, findSpeedPoint, speedPointAt } from './scenario/speed-points'
+export { storedResult } from './scenario/stored-result'

@@ -3,7 +3,7 @@ import { msFromCrankDeg } from '../angle/crank-time'
 import { distributorDegFromCrank } from '../angle/distributor'
 import { advanceCurve } from '../advance/advance-curve'
 import type { Channel } from '../advance/advance-types'
-import { forChannel } from './part'
+import { forChannel, part } from './part'
 import type { ChannelName, CurvePoint, MarkedSpeed, PerChannel, SpeedPoint, StaggerPoint } from './result-types'
 import { readyScenario, type ReadyScenario } from './ready-scenario'
 import type { Scenario } from './scenario-types'
@@ -34,6 +34,12 @@ export function staggerPoint({ sheet }: Scenario, rpm: number, staggerDeg: numbe
 /** Where both channels fire at one speed, at full-throttle pressure unless told otherwise, engine speeding up. */
 export const speedPointAt = (scenario: Scenario, rpm: number, mapKpa = scenario.sheet.manifold.fullKpa): SpeedPoint =>
   speedPoint(readyScenario(scenario), rpm, mapKpa)
+
+/** The same, or null where a channel cannot be computed at this speed. */
+export function findSpeedPoint(scenario: Scenario, rpm: number): SpeedPoint | null {
+  const found = part(() => speedPointAt(scenario, rpm))
+  return found.ok ? found : null
+}
 
 function speedPoint(scenario: ReadyScenario, rpm: number, mapKpa: number): SpeedPoint {
   const primaryDeg = scenario.advance('primary', rpm, mapKpa)
