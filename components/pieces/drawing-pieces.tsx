@@ -2,6 +2,7 @@
 
 import { PlotPieces } from './plot-pieces'
 import { Section } from '@/components/ui/section'
+import { WheelFigure } from '@/components/wheel/wheel-figure'
 import { DegreeWheel } from '@/components/wheel/degree-wheel'
 
 const six = ['1', '6', '3', '2', '5', '4'].map((label, index) => ({ label, atDeg: index * 120 }))
@@ -27,8 +28,7 @@ export function DrawingPieces() {
         <div className="flex flex-wrap gap-6 pt-3">
           {wheels.map(({ title, ...wheel }) => (
             <div key={title} style={{ width: 366, maxWidth: '100%' }}>
-              <h3>{title}</h3>
-              <DegreeWheel rpm={2780} {...wheel} staggerDeg={wheel.primaryDeg - wheel.backupDeg} staggerMs={(wheel.primaryDeg - wheel.backupDeg) / (0.006 * 2780)} />
+              <WheelFigure title={title} csvName="wheel" rpm={2780} {...wheel} staggerDeg={wheel.primaryDeg - wheel.backupDeg} staggerMs={(wheel.primaryDeg - wheel.backupDeg) / (0.006 * 2780)} />
             </div>
           ))}
         </div>
