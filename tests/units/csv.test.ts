@@ -15,7 +15,7 @@ describe('CSV', () => {
     expect(toCsv([[null, undefined, '', false]], ['a', 'b', 'c', 'd'])).toBe('a,b,c,d\r\n,,,false\r\n')
   })
 
-  it.each(someCases(['=1+1', '+cmd', '-cmd', '@sum', '\t=1', '\r=1', ' =1', '\uff1d1', '=HYPERLINK("x")']))('disarms %j, in rows and heading', (text) => {
+  it.each(someCases(['=1+1', '+cmd', '-cmd', '@sum', '\t=1', '\tx', '\r=1', ' =1', '\uff1d1', '=HYPERLINK("x")']))('disarms %j, in rows and heading', (text) => {
     const [heading, cell] = [toCsv([], [text]), toCsv([[text]], ['h']).slice(3)]
     for (const written of [heading, cell]) expect(written.replace(/^"/, '').startsWith("'")).toBe(true)
   })

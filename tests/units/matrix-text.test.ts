@@ -31,7 +31,10 @@ describe('a pasted map', () => {
   it('reads plain numbers in the person’s units, and the corner’s units before them', () => {
     const us = parseMatrix('\t30\n1000\t24', shape, 'us')
     expectClose(us.ok ? us.matrix.columns[0] : null, 101.59165921023, { rel: 1e-12 })
-    expect(parseMatrix('rpm \\ kPa\t95\n1000\t24', shape, 'us')).toMatchObject({ matrix: { columns: [95] } })
+    for (const corner of someCases(['rpm \\ kPa', 'rpm/kPa', 'Speed (rpm) | Pressure [kPa]'])) {
+      expect(parseMatrix(`${corner}\t95\n1000\t24`, shape, 'us'), corner).toMatchObject({ matrix: { columns: [95] } })
+    }
+    expect(parseMatrix('in \\ kPa\t95\n2\t24', { ...shape, row: { kind: 'length', label: 'Gap' } }, 'metric')).toMatchObject({ matrix: { rows: [50.8], columns: [95] } })
   })
 })
 

@@ -53,6 +53,7 @@ describe('a range, in the person’s units', () => {
     ['angle', 'us', { min: -10, max: 60 }, 'Bore must be at least \u221210° and at most 60°.'],
     ['length', 'us', { above: 0 }, 'Bore must be more than 0\u00a0in.'],
     ['length', 'us', { max: 25.4 }, 'Bore must be at most 1\u00a0in.'],
+    ['percent', 'us', { max: 0.29 }, 'Bore must be at most 29\u00a0%.'],
     ['ratio', 'us', { above: 0, below: 1 }, 'Bore must be more than 0 and less than 1.'],
   ]))('%s in %s', (kind, system, range, expected) => {
     expect(rangeSentence('Bore', kind, system, range)).toBe(expected)

@@ -65,6 +65,7 @@ describe('what a block is refused for', () => {
   it('keeps to the mark that fits most lines', () => {
     expect(sentences('1000, 20.5\n2450, abc')).toEqual([{ line: 2, column: 2, sentence: expect.stringContaining('Line 2, Advance: “abc”') }])
     expect(sentences('1000  20.5\n2450  2 6 5')).toEqual([{ line: 2, column: 2, sentence: expect.stringContaining('more than one number') }])
+    expect(sentences('1000 rmp  20.5 dge').map((error) => error.column)).toEqual([1, 2])
     expect(sentences('1000,20,5')).toEqual([{ line: 1, column: null, sentence: expect.stringContaining('holds 3 values where 2') }])
   })
 
