@@ -1,7 +1,7 @@
 interface ScenarioMoreProps {
   id: string
   archived: boolean
-  canWrite: boolean
+  canArchive: boolean
   duplicate: (form: FormData) => Promise<void>
   archive: (form: FormData) => Promise<void>
   restore: (form: FormData) => Promise<void>
@@ -17,11 +17,11 @@ function OneButton({ id, action, label }: { id: string, action: (form: FormData)
 }
 
 /** What is done with a whole scenario. */
-export function ScenarioMore({ id, archived, canWrite, duplicate, archive, restore }: ScenarioMoreProps) {
+export function ScenarioMore({ id, archived, canArchive, duplicate, archive, restore }: ScenarioMoreProps) {
   return (
     <span className="more">
       <OneButton id={id} action={duplicate} label="Duplicate" />
-      {canWrite ? archived ? <OneButton id={id} action={restore} label="Restore" /> : <OneButton id={id} action={archive} label="Archive" /> : null}
+      {canArchive ? archived ? <OneButton id={id} action={restore} label="Restore" /> : <OneButton id={id} action={archive} label="Archive" /> : null}
     </span>
   )
 }

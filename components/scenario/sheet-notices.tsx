@@ -12,7 +12,7 @@ interface SheetNoticesProps {
 export function SheetNotices({ notices, engineChanged, archived, canWrite }: SheetNoticesProps) {
   const lines = [
     ...(archived ? ['This scenario is archived: it can be looked at and tried out, and saved again once it is restored.'] : []),
-    ...(canWrite ? [] : ['You may look at this scenario and try changes; saving needs another role.']),
+    ...(canWrite || archived ? [] : ['You may look at this scenario and try changes; saving needs another role.']),
     ...(engineChanged ? ['The engine’s sheet was changed since this revision was saved; the figures here use it as it is now.'] : []),
     ...notices.map(noticeWords),
   ]

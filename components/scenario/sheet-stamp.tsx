@@ -5,7 +5,7 @@ import { ChannelChip } from '@/components/ui/channel-chip'
 import { Stamp } from '@/components/ui/stamp'
 import type { ScenarioResult } from '@/lib/calc/scenario/result-types'
 import type { UnitSystem } from '@/lib/units'
-import { findingTitle, findingValue, headLine, letterOf, limitWords } from '@/lib/words/findings'
+import { findingLead, findingValue, headLine, letterOf, limitWords } from '@/lib/words/findings'
 
 interface SheetStampProps {
   result: Pick<ScenarioResult, 'counts' | 'findings'>
@@ -23,7 +23,7 @@ export const SheetStamp = memo(function SheetStamp({ result: { counts, findings 
       {worst && worst.verdict !== 'within' ? (
         <>
           {worst.channel ? <><ChannelChip channel={letterOf(worst.channel)} /> </> : null}
-          {findingTitle(worst, system)}{value ? <>: <b className={worst.verdict === 'outside' ? 'one bad' : 'one'}>{value.text}{value.unit === '°' ? '°' : value.unit ? ` ${value.unit}` : ''}</b></> : null}; {limitWords(worst, system)}.
+          {findingLead(worst, system)}{value ? <> <b className={worst.verdict === 'outside' ? 'one bad' : 'one'}>{value.text}{value.unit === '°' ? '°' : value.unit ? ` ${value.unit}` : ''}</b></> : null}; {limitWords(worst, system)}.
         </>
       ) : stale ? null : 'By the limits named beside each finding.'}
       {stale ? ' An input cannot be read: some figures are the last valid ones.' : null}

@@ -48,7 +48,7 @@ export function WorkbenchHead({ scenario, title, saved, dirty, saving, formId, r
       <PageHead
         over={(
           <>
-            Scenario {scenario.code} · revision {saved.number} · {saved.by}, <TimeAt iso={saved.at} />
+            Scenario {scenario.code} · <span title={`saved by ${saved.by}`}>revision {saved.number}</span> · <TimeAt iso={saved.at} />
             <span className="sheet-state" role="status">{offline ? ' · no connection: saving waits for it' : saving ? ' · saving' : dirty ? ' · changes not saved' : ''}</span>
           </>
         )}

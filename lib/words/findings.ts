@@ -35,6 +35,12 @@ export function findingTitle({ limitId, verdict, value }: Pick<Finding, 'limitId
   return titles[limitId]
 }
 
+/** The same before its figure, for a head that names both: "Full timing shows only from" 1523 rpm. */
+export function findingLead(finding: Pick<Finding, 'limitId' | 'verdict' | 'value'>, system: UnitSystem): string {
+  if (finding.limitId === 'proofAboveIdleRpm' && finding.verdict === 'outside' && finding.value !== null) return 'Full timing shows only from'
+  return findingTitle(finding, system)
+}
+
 export function findingValue({ value, unit, limitId }: Finding, system: UnitSystem): FormattedQuantity | null {
   if (value === null) return null
   return formatQuantity(value, kindOfUnit[unit], system, limitId === 'beyondMbtDeg' || limitId === 'backupFirstDeg' ? { sign: true } : {})

@@ -93,7 +93,8 @@ function proofDraft(scenario: Scenario, channel: ChannelName, proof: { rpm: PerC
   return {
     limitId: 'proofAboveIdleRpm', channel, value: proof.rpm[channel], limit: engine.idleRpm + limits.proofAboveIdleRpm.value,
     data: { idleRpm: engine.idleRpm, maxRpm: engine.maxRpm, toleranceDeg: proof.toleranceDeg, followsPressure: dependsOnPressure(sheet[channel]) },
-    inputs: [...scheduleInputs(channel), `sheet.${channel}.crankRetard.belowRpm`, 'sheet.tolerances.timingCheckDeg', 'engine.idleRpm'], sourceIds: ['trade'], method: 'proof-speed',
+    // The retard stands in the way only where it acts above idle.
+    inputs: [...scheduleInputs(channel), ...((sheet[channel].crankRetard?.belowRpm ?? 0) > engine.idleRpm ? [`sheet.${channel}.crankRetard.belowRpm`] : []), 'sheet.tolerances.timingCheckDeg', 'engine.idleRpm'], sourceIds: ['trade'], method: 'proof-speed',
   }
 }
 

@@ -28,6 +28,7 @@ export default async function ScenarioPage({ params, searchParams }: ScenarioPag
   const [actor, { id }, { from }] = await Promise.all([requireActor(), params, searchParams])
   const scenario = await pageData(() => getScenario(actor, id))
   const { engine, revision } = scenario
+  const canArchive = can(actor, 'scenario.archive') || (can(actor, 'scenario.archiveOwn') && scenario.owner.id === actor.userId)
   const older = typeof from === 'string' && from !== String(revision.number) ? await pageData(() => getRevision(actor, id, Number(from))) : null
   const shown = older ?? revision
   const { result } = await pageData(() => evaluateForActor(actor, { engineId: engine.id, sheet: shown.sheet }))
@@ -49,7 +50,7 @@ export default async function ScenarioPage({ params, searchParams }: ScenarioPag
       limits={defaultLimits}
       system={system}
       save={saveSheet.bind(null, id)}
-      more={<ScenarioMore id={id} archived={scenario.archivedAt !== null} canWrite={scenario.canWrite} duplicate={duplicateScenario} archive={archiveScenario} restore={restoreScenario} />}
+      more={<ScenarioMore id={id} archived={scenario.archivedAt !== null} canArchive={canArchive} duplicate={duplicateScenario} archive={archiveScenario} restore={restoreScenario} />}
     />
   )
 }
