@@ -18,11 +18,11 @@ export function EngineActs({ id, archived, scenarioCount, duplicate, archive, re
   if (!duplicate && !archive && !restore && !remove) return null
   return (
     <Section title="This engine">
-      <p className="acts mt-3">
+      <div className="acts mt-3">
         {duplicate ? <ActForm action={duplicate} fields={fields}>Duplicate</ActForm> : null}
         {archived ? restore && <ActForm action={restore} fields={fields}>Restore</ActForm> : archive && <ActForm action={archive} fields={fields}>Archive</ActForm>}
         {scenarioCount === 0 && remove ? <ActForm action={remove} fields={fields}>Remove for good</ActForm> : null}
-      </p>
+      </div>
       <p className="fine mt-2">
         {scenarioCount > 0
           ? 'Archiving takes it out of the lists; its scenarios stay readable and are saved again once it is restored. It can be removed only while no scenario stands on it.'

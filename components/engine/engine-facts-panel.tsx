@@ -1,3 +1,4 @@
+import { Fragment } from 'react'
 import { CapDiagram } from './cap-diagram'
 import { FiringStrip } from './firing-strip'
 import { LinkButton } from '@/components/ui/button'
@@ -29,10 +30,10 @@ export function EngineFactsPanel({ values, system, onFillCap }: EngineFactsPanel
       <Section title="Worked out">
         <dl className="facts efacts">
           {engineFacts(values, system).map(({ id, label, kind, value, needs }) => (
-            <div key={id} className="contents">
+            <Fragment key={id}>
               <dt>{label}</dt>
               <dd>{value === null ? <span className="fine">{needs}</span> : <Quantity {...{ value, kind, system }} />}</dd>
-            </div>
+            </Fragment>
           ))}
         </dl>
       </Section>

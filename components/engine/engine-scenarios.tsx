@@ -18,7 +18,7 @@ export function EngineScenarios({ engineId, list, isOwn, canStart }: EngineScena
   return (
     <Section title={isOwn ? 'Your scenarios on it' : 'Scenarios on it'} right={<>{nextCursor ? <TextLink href={`/scenarios?engineId=${engineId}`}>all of them</TextLink> : null} {canStart ? <TextLink href={`/scenarios/new?engine=${engineId}`}>start one</TextLink> : null}</>}>
       {rows.length > 0
-        ? <RuledList label="Scenarios on this engine">{rows.slice(0, 12).map((row) => <ScenarioRow key={row.id} row={row} withOwner={!isOwn} />)}</RuledList>
+        ? <RuledList label="Scenarios on this engine">{rows.slice(0, 12).map((row) => <ScenarioRow key={row.id} row={row} withOwner={!isOwn} withEngine={false} />)}</RuledList>
         : <p className="fine mt-2">None is active.</p>}
       {rows.length > 12 && !nextCursor ? <p className="mt-2"><TextLink href={`/scenarios?engineId=${engineId}`}>All {rows.length}</TextLink></p> : null}
     </Section>

@@ -10,11 +10,13 @@ interface ScenarioRowProps {
   row: ScenarioRowDto
   /** Whose it is; left out where all are one person's. */
   withOwner: boolean
+  /** Left out on the engine's own page. */
+  withEngine?: boolean
   restore?: { action: FormAction, next: string }
 }
 
 /** A scenario in a list: verdict in the margin, name, code, revision, when, what the limits say. */
-export function ScenarioRow({ row, withOwner, restore }: ScenarioRowProps) {
+export function ScenarioRow({ row, withOwner, withEngine = true, restore }: ScenarioRowProps) {
   const { code, title, counts, currentRevision, releasedRevision, updatedAt, archivedAt } = row
   return (
     <RuledRow
@@ -22,7 +24,7 @@ export function ScenarioRow({ row, withOwner, restore }: ScenarioRowProps) {
       right={(
         <span className="lright">
           {archivedAt && restore ? <ActForm action={restore.action} fields={{ id: row.id, next: restore.next }} size="small">Restore</ActForm> : null}
-          <small>{row.engine.name}{withOwner ? <>, {row.owner.name}</> : null}</small>
+          <small>{[withEngine && row.engine.name, withOwner && row.owner.name].filter(Boolean).join(', ')}</small>
         </span>
       )}
     >

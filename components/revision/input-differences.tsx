@@ -24,7 +24,7 @@ interface InputDifferencesProps {
 
 function Cell({ text, row }: { text: string, row: InputRow }) {
   if (text === noneWord) return <span className="fine">{noneWord}</span>
-  if (row.layout === 'block') return <pre className="block">{text}</pre>
+  if (row.layout !== 'line') return <pre className={`block ${row.layout}`}>{text}</pre>
   return row.unit ? <Num value={text} unit={row.unit.joined ? '°' : row.unit.symbol} /> : <b>{text}</b>
 }
 
@@ -41,7 +41,7 @@ export function InputDifferences({ fields, left, right, system, all = false, cap
         rows: rows.map((row) => ({
           key: row.key, channel: row.channel, label: row.label,
           left: <Cell text={row.left} row={row} />, right: <Cell text={row.right} row={row} />,
-          difference: row.difference, isSame: row.isSame, isBlock: row.layout === 'block',
+          difference: row.difference, isSame: row.isSame, isBlock: row.layout !== 'line',
         })),
       }]}
     />

@@ -13,7 +13,7 @@ interface InputSheetProps {
 }
 
 function Value({ row }: { row: InputRow }) {
-  if (row.layout === 'block') return <pre className="block">{row.left}</pre>
+  if (row.layout !== 'line') return <pre className={`block ${row.layout}`}>{row.left}</pre>
   return row.unit ? <Num value={row.left} unit={row.unit.joined ? '°' : row.unit.symbol} /> : <b>{row.left}</b>
 }
 
@@ -27,7 +27,7 @@ export function InputSheet({ sections, values, system, level = 3 }: InputSheetPr
         return (
           <Section key={title} title={channel ? <><ChannelChip channel={channel} /> {title}</> : title} level={level}>
             <dl className="facts ifacts">
-              {rows.map((row) => <div key={row.key} className={row.layout === 'block' ? 'tall' : undefined}><dt>{row.label}</dt><dd><Value row={row} /></dd></div>)}
+              {rows.map((row) => <div key={row.key} className={row.layout !== 'line' ? 'tall' : undefined}><dt>{row.label}</dt><dd><Value row={row} /></dd></div>)}
             </dl>
           </Section>
         )

@@ -4,6 +4,7 @@ import type { ReactNode } from 'react'
 import { FindingsList } from '@/components/scenario/findings-list'
 import { ResultLedgers } from '@/components/scenario/result-ledgers'
 import { TimingDrawings } from '@/components/scenario/timing-drawings'
+import { Section } from '@/components/ui/section'
 import type { PartName, ScenarioResult } from '@/lib/calc/scenario/result-types'
 import type { Scenario } from '@/lib/calc/scenario/scenario-types'
 import type { UnitSystem } from '@/lib/units'
@@ -27,7 +28,9 @@ interface RevisionBodyProps {
 export function RevisionBody({ scenario, result, system, name, reasons, beforeFigures }: RevisionBodyProps) {
   return (
     <>
-      <TimingDrawings scenario={scenario} result={result} deferred={result} stale={noParts} system={system} name={name} />
+      <Section title="When each channel fires">
+        <TimingDrawings scenario={scenario} result={result} deferred={result} stale={noParts} system={system} name={name} />
+      </Section>
       <FindingsList findings={result.findings} staleFindings={noFindings} system={system} reasons={reasons} />
       {beforeFigures}
       <ResultLedgers parts={result.parts} stale={noParts} scenario={scenario} system={system} />

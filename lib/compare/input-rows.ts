@@ -14,8 +14,8 @@ export interface InputRow {
   isSame: boolean
   /** Right less left in the person's units, signed; null where there is no such number. */
   difference: string | null
-  /** block: texts of several lines. */
-  layout: 'line' | 'block'
+  /** block: lines of figures; words: a text of several lines. */
+  layout: 'line' | 'block' | 'words'
 }
 
 /** Stands where one side has nothing. */
@@ -93,7 +93,7 @@ function rowsOf(field: FieldDef, left: string, right: string, system: UnitSystem
     left: leftText, right: rightText, isSame,
     unit: unit?.symbol ? { symbol: unit.symbol, joined: unit.joined } : null,
     difference: isSame ? null : field.kind === 'matrix' ? matrixStep(field, left, right, system) : step?.text ?? null,
-    layout: field.kind === 'table' || field.kind === 'matrix' || field.kind === 'longText' ? 'block' : 'line',
+    layout: field.kind === 'table' || field.kind === 'matrix' ? 'block' : field.kind === 'longText' ? 'words' : 'line',
   }]
 }
 

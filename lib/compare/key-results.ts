@@ -12,6 +12,8 @@ export interface KeyResult {
   value: number | null
   /** Stands in place of a value that does not exist. */
   none?: string
+  /** Others than the quantity's own. */
+  decimals?: number
   /** A signed quantity: its sign shows always. */
   signed?: boolean
 }
@@ -56,7 +58,7 @@ export function keyResults(result: Pick<ScenarioResult, 'parts'>, system: UnitSy
       ...channels.map((channel): KeyResult => ({ id: `shortOfMbt.${channel}`, label: 'Short of best torque', channel, kind: 'angle', value: shortOfMbtDeg[channel], signed: true })),
     ]),
     group('deadCylinders', 'One cylinder cold', parts.deadCylinders, ({ rows }) => channels.map((channel): KeyResult => ({
-      id: `oneCold.${channel}`, label: 'Power left', channel, kind: 'percent', value: rows[1]?.[channel].fraction ?? null, none: 'no other cylinder',
+      id: `oneCold.${channel}`, label: 'Power left', channel, kind: 'percent', value: rows[1]?.[channel].fraction ?? null, none: 'no other cylinder', decimals: 1,
     }))),
     group('runUp', 'Run-up', parts.runUp, ({ rows }) => rows.flatMap((row) => channels.flatMap((channel): KeyResult[] => [
       { id: `runUp.${row.pitch}.${channel}`, label: `Expected speed, ${row.pitch}`, channel, kind: 'engineSpeed', value: row[channel].rpm },

@@ -33,9 +33,9 @@ export interface ResultGroup {
 
 const sameWord = 'same'
 
-function step(left: number | null | undefined, right: number | null | undefined, kind: QuantityKind, system: UnitSystem): string | null {
+function step(left: number | null | undefined, right: number | null | undefined, kind: QuantityKind, system: UnitSystem, decimals?: number): string | null {
   if (left === null || left === undefined || right === null || right === undefined) return null
-  const { text } = formatQuantity(right - left, kind, system, { sign: true })
+  const { text } = formatQuantity(right - left, kind, system, { sign: true, decimals })
   return /[1-9]/.test(text) ? text : sameWord
 }
 
@@ -77,7 +77,7 @@ export function keyRows(left: Result, right: Result, system: UnitSystem): Result
   const lefts = keyResults(left, system)
   const rights = keyResults(right, system)
   const side = (row: KeyResult | undefined): ResultSide | null =>
-    (row ? { text: row.value === null ? row.none ?? 'none' : formatQuantity(row.value, row.kind, system, { sign: row.signed }).text, verdict: null } : null)
+    (row ? { text: row.value === null ? row.none ?? 'none' : formatQuantity(row.value, row.kind, system, { sign: row.signed, decimals: row.decimals }).text, verdict: null } : null)
   return lefts.flatMap((group, i): ResultGroup[] => {
     const others = rights[i]?.rows ?? []
     const ids = [...new Set([...group.rows, ...others].map((row) => row.id))]
@@ -85,7 +85,7 @@ export function keyRows(left: Result, right: Result, system: UnitSystem): Result
       const [was, is] = [group.rows, others].map((list) => list.find((row) => row.id === id))
       const any = is ?? was
       return any
-        ? [{ id, label: any.label, channel: any.channel, limit: null, unit: unitFor(any.kind, system), left: side(was), right: side(is), difference: step(was?.value, is?.value, any.kind, system) }]
+        ? [{ id, label: any.label, channel: any.channel, limit: null, unit: unitFor(any.kind, system), left: side(was), right: side(is), difference: step(was?.value, is?.value, any.kind, system, any.decimals) }]
         : []
     })
     return rows.length > 0 ? [{ id: group.id, title: group.title, rows }] : []

@@ -1,6 +1,6 @@
 import type { Metadata } from 'next'
-import { restoreScenario } from './actions'
-import { engineChoices } from './engine-choices'
+import { restoreScenario } from '../actions'
+import { engineChoices } from '../engine-choices'
 import { ListFailed } from '@/components/lists/list-failed'
 import { ProblemNote } from '@/components/lists/problem-note'
 import { ScenarioListView } from '@/components/lists/scenario-list-view'

@@ -1,5 +1,5 @@
 import type { Metadata } from 'next'
-import { restoreEngine } from './actions'
+import { restoreEngine } from '../actions'
 import { EngineListView } from '@/components/lists/engine-list-view'
 import { ListFailed } from '@/components/lists/list-failed'
 import { ProblemNote } from '@/components/lists/problem-note'
