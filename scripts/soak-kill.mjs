@@ -4,6 +4,7 @@
  * is there:  npm run soak:kill [-- --short | --minutes 10]
  */
 import { setTimeout as sleep } from 'node:timers/promises'
+import { askedToStop } from './lib/asked-to-stop.mjs'
 import { endAllGroups, endGroup } from './lib/children.mjs'
 import { demoSignIns } from './lib/demo-sign-ins.mjs'
 import { Failure, sentenceOf } from './lib/failure.mjs'
@@ -73,7 +74,8 @@ async function run() {
 }
 
 try {
-  await run()
+  // Stopped half-way it still takes its database away.
+  await Promise.race([run(), askedToStop(() => { process.exitCode = 130 })])
 } catch (error) {
   console.error(sentenceOf(error))
   process.exitCode = 1
@@ -81,3 +83,4 @@ try {
   await endAllGroups()
   await database.destroy().catch((error) => console.error(sentenceOf(error)))
 }
+process.exit()
