@@ -13,6 +13,9 @@ const KILLED_MS = 2_000
 /** Every process group started here and not yet ended. @type {Set<number>} */
 const groups = new Set()
 
+/** A child sees a pipe: whether its colours are wanted is seen here, from where its output ends up. */
+const COLOUR = process.stdout.isTTY ? { FORCE_COLOR: '1' } : { NO_COLOR: '1', FORCE_COLOR: undefined }
+
 /** Once the command is ending, nothing more is started and nobody waits for what was ended. */
 let ending = false
 
@@ -26,7 +29,7 @@ let ending = false
 export function startGroup(program, args, env = {}) {
   if (ending) throw new Failure('This command is ending.')
   const child = spawn(program, args, {
-    cwd: root, detached: true, stdio: ['ignore', 'pipe', 'pipe'], env: { ...process.env, NEXT_TELEMETRY_DISABLED: '1', ...env },
+    cwd: root, detached: true, stdio: ['ignore', 'pipe', 'pipe'], env: { ...process.env, ...COLOUR, NEXT_TELEMETRY_DISABLED: '1', ...env },
   })
   if (child.pid) groups.add(child.pid)
   return child
