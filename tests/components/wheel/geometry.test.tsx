@@ -59,6 +59,10 @@ describe('two turns on one wheel', () => {
     expect(foldCylinders([{ label: '1', atDeg: 0 }, { label: '2', atDeg: 315 }])).toEqual([{ label: '1', atDeg: 0 }, { label: '2', atDeg: 315 }])
   })
 
+  test('a cylinder alone in its place of the second turn stands in the first', () => {
+    expect(foldCylinders([{ label: '1', atDeg: 0 }, { label: '2', atDeg: 432 }])).toEqual([{ label: '1', atDeg: 0 }, { label: '2', atDeg: 72 }])
+  })
+
   test('dust of a sum to 720 does not part a pair', () => {
     expect(foldCylinders([{ label: '1', atDeg: 0 }, { label: '2', atDeg: 359.9999999 }])).toHaveLength(1)
   })
