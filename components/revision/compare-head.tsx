@@ -18,7 +18,7 @@ export function CompareSide({ revision, digit, href }: { revision: RevisionDto, 
       <small>revision {number}, <TimeAt iso={createdAt} />, {author.name}{releasedAt ? '; released' : ''}</small>
       {full ? (
         <DegreeWheel
-          size="mini" rpm={full.rpm} rotation={spec.crankRotation} cylindersAt={firings.map(({ cylinder, atDeg }) => ({ label: String(cylinder), atDeg }))}
+          width={238} rpm={full.rpm} rotation={spec.crankRotation} cylindersAt={firings.map(({ cylinder, atDeg }) => ({ label: String(cylinder), atDeg }))}
           primaryDeg={full.primaryDeg} backupDeg={full.backupDeg} staggerDeg={full.staggerDeg} staggerMs={full.staggerMs}
         />
       ) : null}

@@ -44,7 +44,7 @@ export function DiffTable({ caption, columns, groups }: { caption: string, colum
           {title === null ? null : <tr className="gh"><th scope="rowgroup" colSpan={4}>{title}</th></tr>}
           {rows.map((row) => (
             <tr key={row.key} className={clsx(row.isBlock && 'tall') || undefined}>
-              <th scope="row">{row.channel ? <><ChannelChip channel={letterOf(row.channel)} spoken /> </> : null}{row.label}{row.under ? <small>{row.under}</small> : null}</th>
+              <th scope="row">{row.channel ? <><ChannelChip channel={letterOf(row.channel)} spoken /> </> : null}{row.label}{row.under ? <> <small>{row.under}</small></> : null}</th>
               <td className="r">{row.left}</td>
               <td className="r">{row.right}</td>
               <td className="r df">{row.isSame || row.difference === 'same' ? <small>same</small> : row.difference ?? <small>changed</small>}</td>
