@@ -5,20 +5,31 @@ import { entities } from '@/entities/index'
 import { databaseUrl } from '@/lib/database-url'
 import config from '@/mikro-orm.config'
 
-// The promise is cached, not its result: requests that arrive during the first connection share it.
-type Slot = { entities: unknown, orm: Promise<MikroORM> }
-const globalSlot = globalThis as unknown as { halfspeedOrm?: Slot }
+/**
+ * One ORM for each copy of the entities: the framework bundles pages and route handlers apart, so the same process holds several, and
+ * each must find its own. The promise is cached, not its result: requests that arrive during the first connection share it.
+ */
+const holder = globalThis as unknown as { halfspeedOrms?: Map<unknown, Promise<MikroORM>> }
+
+/** Copies that live side by side in a built server, with room to spare; more are left over from edits under the development server. */
+const mostCopies = 4
+
+const close = (orm: Promise<MikroORM>) => orm.then((opened) => opened.close(true), () => {})
 
 export function getOrm(): Promise<MikroORM> {
-  const old = globalSlot.halfspeedOrm
-  if (old && old.entities === entities) return old.orm
-  if (old) void old.orm.then((orm) => orm.close(true), () => {}) // an entity file was edited under `next dev`
+  const orms = (holder.halfspeedOrms ??= new Map())
+  const known = orms.get(entities)
+  if (known) return known
   const orm = Promise.resolve().then(() => MikroORM.init({ ...config, clientUrl: databaseUrl() }))
-  const slot: Slot = { entities, orm }
-  globalSlot.halfspeedOrm = slot
+  orms.set(entities, orm)
   orm.catch(() => {
-    if (globalSlot.halfspeedOrm === slot) globalSlot.halfspeedOrm = undefined // the next request tries again
+    if (orms.get(entities) === orm) orms.delete(entities) // the next request tries again
   })
+  const [oldest] = orms
+  if (orms.size > mostCopies && process.env.NODE_ENV === 'development' && oldest) {
+    orms.delete(oldest[0])
+    void close(oldest[1])
+  }
   return orm
 }
 
@@ -32,7 +43,7 @@ export const requestEm = cache(newEm)
 
 /** For scripts and tests, which end. */
 export async function closeOrm(): Promise<void> {
-  const slot = globalSlot.halfspeedOrm
-  globalSlot.halfspeedOrm = undefined
-  if (slot) await (await slot.orm).close(true)
+  const orms = [...(holder.halfspeedOrms?.values() ?? [])]
+  holder.halfspeedOrms = undefined
+  await Promise.all(orms.map(close))
 }
