@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest'
 import { rolesThatMay } from '@/lib/auth/who-may'
-import { isNarrowed, listAddress } from '@/lib/list-address'
+import { isNarrowed, listAddress, type ListParams } from '@/lib/list-address'
 import { revisionNumber } from '@/lib/schemas/revision-number'
 import { defaultLimits } from '@/lib/calc/limits'
 import { limitLine } from '@/lib/words/limits'
@@ -54,7 +54,8 @@ describe('address of a list', () => {
   })
 
   it('is narrowed by a search or an engine, not by state or order', () => {
-    expect([{ search: 'x' }, { engineId: '1' }, { state: 'outside' }, { sort: 'title' }, {}].map(isNarrowed)).toEqual([true, true, false, false, false])
+    const asked: ListParams[] = [{ search: 'x' }, { engineId: '1' }, { state: 'outside' }, { sort: 'title' }, {}]
+    expect(asked.map(isNarrowed)).toEqual([true, true, false, false, false])
   })
 
   it('takes only plain digits as the number of a revision', () => {
