@@ -14,7 +14,7 @@ export function StateLinks({ path, params, label, states }: StateLinksProps) {
   return (
     <nav className="pick" aria-label={label}>
       {states.map(({ value, label: words }, index) => (
-        <Link key={value} href={listAddress(path, params, { state: index === 0 ? null : value })} aria-current={value === now ? 'page' : undefined}>{words}</Link>
+        <Link prefetch={false} key={value} href={listAddress(path, params, { state: index === 0 ? null : value })} aria-current={value === now ? 'page' : undefined}>{words}</Link>
       ))}
     </nav>
   )

@@ -15,7 +15,7 @@ export function EntryPage({ title, children, picture }: EntryPageProps) {
   return (
     <main className="si" id="main" tabIndex={-1}>
       <div className="form">
-        <Link className="mark" href="/"><BrandGlyph />Halfspeed</Link>
+        <Link prefetch={false} className="mark" href="/"><BrandGlyph />Halfspeed</Link>
         <h1>{title}</h1>
         {children}
       </div>

@@ -50,7 +50,7 @@ export function InputBook({ form, engine, canOpenEngine }: InputBookProps) {
     <>
       <Fold title="Engine" level={2} summary={engineSummary(engine.spec, system)}>
         <p className="fnote">
-          {engine.name}. {canOpenEngine ? <Link className="link" href={`/engines/${engine.id}`}>Open the engine’s sheet</Link> : null}
+          {engine.name}. {canOpenEngine ? <Link prefetch={false} className="link" href={`/engines/${engine.id}`}>Open the engine’s sheet</Link> : null}
         </p>
       </Fold>
       <Fold title={<><ChannelChip channel="A" /> Primary channel</>} level={2} open>

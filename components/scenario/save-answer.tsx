@@ -31,7 +31,7 @@ export function SaveAnswer({ answer, values, errors, system, onKeepMine, onTakeT
   if (answer.code === 'conflict' && isRevision(answer.conflict)) {
     const theirs = answer.conflict
     return (
-      <section className="conflict" aria-labelledby="conflict-head" role="alert">
+      <section className="conflict" aria-labelledby="conflict-head">
         <FailedNote level={2} title={<span id="conflict-head">Revision {theirs.number} was saved by {theirs.author.name} meanwhile</span>}>
           <p>Nothing is lost: theirs is stored, yours is still here in the form. These inputs differ:</p>
         </FailedNote>

@@ -3,13 +3,15 @@
 import { useCallback, useEffect, useReducer } from 'react'
 import { loadFormulaParser } from '@/lib/calc/advance/load-formula-parser'
 import type { FormValues } from '@/lib/schemas/field'
-import { editLive, startLive, type LiveContext, type LiveState } from '@/lib/workbench/live-evaluation'
+import type { UnitSystem } from '@/lib/units'
+import { editLive, turnUnits, type LiveContext, type LiveState } from '@/lib/workbench/live-evaluation'
 
 type LiveAction =
   | { kind: 'edit', changes: FormValues }
   | { kind: 'again' }
   | { kind: 'replace', state: LiveState }
   | { kind: 'context', context: LiveContext }
+  | { kind: 'system', system: UnitSystem }
 
 interface Held {
   live: LiveState
@@ -21,6 +23,10 @@ function reduce({ live, context }: Held, action: LiveAction): Held {
     case 'edit': return { live: editLive(live, action.changes, context), context }
     case 'again': return { live: editLive(live, {}, context), context }
     case 'replace': return { live: action.state, context }
+    case 'system': {
+      const turned = turnUnits(live, context, action.system)
+      return { live: turned.state, context: turned.context }
+    }
     case 'context': return { live: editLive(live, {}, action.context), context: action.context }
   }
 }
@@ -41,5 +47,6 @@ export function useLiveEvaluation(start: () => LiveState, context: LiveContext) 
   const edit = useCallback((name: string, value: string) => dispatch({ kind: 'edit', changes: { [name]: value } }), [])
   const replace = useCallback((state: LiveState) => dispatch({ kind: 'replace', state }), [])
   const setContext = useCallback((next: LiveContext) => dispatch({ kind: 'context', context: next }), [])
-  return { live, context: held.context, edit, replace, setContext, startLive }
+  const turnTo = (system: UnitSystem) => dispatch({ kind: 'system', system })
+  return { live, context: held.context, edit, replace, setContext, turnTo }
 }

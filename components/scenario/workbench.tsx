@@ -52,11 +52,13 @@ export function Workbench(props: WorkbenchProps) {
   const [formAnswer, formAction] = useActionState(props.save, { ok: false })
   const [view, setView] = useState<'result' | 'inputs'>('result')
   const context = { engine: props.engine.spec, limits, system, base: props.sheet }
-  const { live, context: now, edit, replace, setContext } = useLiveEvaluation(() => {
+  const { live, context: now, edit, replace, setContext, turnTo } = useLiveEvaluation(() => {
     const opened = startLive(props.values, props.sheet, props.result)
     if (formAnswer.ok && formAnswer.data.kind === 'evaluated') return startLive(formAnswer.data.values, formAnswer.data.sheet, formAnswer.data.result)
     return !formAnswer.ok && formAnswer.values ? editLive(opened, formAnswer.values, context) : opened
   }, context)
+  // The person changed their units while this page was open: what was typed turns with them.
+  if (now.system !== system) turnTo(system)
   const { answer, saved, saving, engineVersion, submit, setSaved } = useSave({
     save: props.save, first: formAnswer, saved: props.saved, engineVersion: props.engine.version,
     onSaved: (revision) => {
@@ -70,7 +72,9 @@ export function Workbench(props: WorkbenchProps) {
   const shownScenario = useDeferredValue(scenarioNow)
   const flagged = useMemo(() => flaggedFields(live.result.findings, live.values), [live.result.findings, live.values])
   const form: SheetForm = { values: live.values, errors: live.errors, faultAt: live.faultAt, flagged, system, onChange: edit }
-  const dirty = live.values !== saved.values && Object.entries(live.values).some(([name, value]) => (saved.values[name] ?? '') !== value)
+  // What was typed for a saved value, or how it reads when the page is opened again: both are saved.
+  const reopened = props.saved.number === saved.number ? props.saved.values : saved.values
+  const dirty = Object.entries(live.values).some(([name, value]) => (saved.values[name] ?? '') !== value && (reopened[name] ?? '') !== value)
 
   useEffect(() => {
     if (!dirty) return

@@ -15,7 +15,7 @@ export function MainNav({ items }: { items: readonly NavItem[] }) {
   const path = usePathname()
   return (
     <nav className="main" aria-label="Main">
-      {items.map((item) => <Link key={item.href} href={item.href} aria-current={isHere(path, item.href) ? 'page' : undefined}>{item.label}</Link>)}
+      {items.map((item) => <Link prefetch={false} key={item.href} href={item.href} aria-current={isHere(path, item.href) ? 'page' : undefined}>{item.label}</Link>)}
     </nav>
   )
 }

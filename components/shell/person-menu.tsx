@@ -56,7 +56,7 @@ export function PersonMenu({ person, theme, items, signOut, setUnitSystem, switc
     <details className="menu" ref={box} onKeyDown={onKeyDown}>
       <summary><span>{person.name}<span className="role">, {person.role}</span></span><DownGlyph /></summary>
       <div className="pane">
-        <nav className="only-n" aria-label="Pages">{items.map((item) => <Link key={item.href} href={item.href}>{item.label}</Link>)}</nav>
+        <nav className="only-n" aria-label="Pages">{items.map((item) => <Link prefetch={false} key={item.href} href={item.href}>{item.label}</Link>)}</nav>
         <p className="fine">{person.shopName}, {person.role}</p>
         {person.shops.length > 1 ? (
           <form action={switchShop} className="line">

@@ -15,7 +15,7 @@ interface TopStripProps {
 export function TopStrip({ homeHref, shopName, items = [], children }: TopStripProps) {
   return (
     <header className="top">
-      <Link className="mark" href={homeHref}><BrandGlyph />Halfspeed</Link>
+      <Link prefetch={false} className="mark" href={homeHref}><BrandGlyph />Halfspeed</Link>
       {shopName ? <span className="shop"><span>{shopName}</span></span> : null}
       {items.length > 0 ? <MainNav items={items} /> : null}
       <div className="who">{children}</div>

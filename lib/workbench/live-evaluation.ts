@@ -5,7 +5,7 @@ import { rankFindings } from '../calc/scenario/findings'
 import type { Finding, Part, PartError, PartName, ScenarioParts, ScenarioResult } from '../calc/scenario/result-types'
 import type { Engine, ScenarioSheet } from '../calc/scenario/scenario-types'
 import { fieldIndex, type FieldErrors, type FormValues } from '../schemas/field'
-import { fieldOfScenarioPath, formToScenario } from '../schemas/scenario-form'
+import { fieldOfScenarioPath, formToScenario, scenarioToForm } from '../schemas/scenario-form'
 import { scenarioFields } from '../schemas/scenario-fields'
 import type { UnitSystem } from '../units'
 
@@ -79,6 +79,19 @@ function keepFindings(fresh: Finding[], last: Finding[], isPartMissing: boolean)
 /** The state a page opens with: computed on the server, so that it stands there without a script. */
 export const startLive = (values: FormValues, sheet: ScenarioSheet, result: ScenarioResult): LiveState =>
   ({ values, lastValid: values, sheet, result, errors: {}, faultAt: {}, stale: new Set(), staleFindings: new Set(), wantsParser: false })
+
+/**
+ * The person turned to the other unit system: what can be read is shown in it, what cannot stays as it was typed. The exact numbers
+ * go along as the sheet the form is filled from.
+ */
+export function turnUnits(state: LiveState, context: LiveContext, system: UnitSystem): { state: LiveState, context: LiveContext } {
+  const shown = { ...state.values, ...scenarioToForm(state.values.title ?? '', state.sheet, system) }
+  // Texts of schedule kinds that are not chosen were typed in the other system: they would be misread.
+  const values: FormValues = { ...shown, notes: state.values.notes ?? '' }
+  for (const name of Object.keys(state.errors)) values[name] = state.values[name] ?? ''
+  const next = { ...context, system, base: state.sheet }
+  return { state: editLive({ ...state, values, lastValid: shown }, {}, next), context: next }
+}
 
 /** One edit: reads the texts, computes what can be computed, keeps the last valid figures of the rest and says which they are. */
 export function editLive(state: LiveState, changes: FormValues, context: LiveContext): LiveState {

@@ -11,6 +11,7 @@ async function judge(page: Page): Promise<void> {
 async function pagesOf(page: Page): Promise<string[]> {
   const firstLink = async (list: string, pattern: RegExp) => {
     await page.goto(list)
+    await page.locator('main li a').first().waitFor()
     const hrefs = await page.locator('main a').evaluateAll((links) => links.map((link) => link.getAttribute('href') ?? ''))
     const found = hrefs.find((href) => pattern.test(href))
     if (!found) throw new Error(`no link like ${pattern} on ${list}`)

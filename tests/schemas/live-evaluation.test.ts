@@ -3,7 +3,7 @@ import '@/lib/calc/index'
 import { defaultLimits } from '@/lib/calc/limits'
 import { evaluateScenario } from '@/lib/calc/scenario/evaluate-scenario'
 import { scenarioToForm } from '@/lib/schemas/scenario-form'
-import { editLive, startLive } from '@/lib/workbench/live-evaluation'
+import { editLive, startLive, turnUnits } from '@/lib/workbench/live-evaluation'
 import { flaggedFields } from '@/lib/workbench/flagged-fields'
 import { sampleEngine, sampleSheet } from './support/samples'
 
@@ -47,6 +47,15 @@ describe('typing into the sheet', () => {
     expect(faulty.faultAt['backup.formula']).toBe(5)
     expect(value(faulty, 'backupPowerRatio.backup')).toBe(value(chosen, 'backupPowerRatio.backup'))
     expect(faulty.result.counts).toEqual(chosen.result.counts)
+  })
+  test('turning the units keeps what was typed, exact where it could be read, as typed where not', () => {
+    const typed = editLive(editLive(start(), { 'rotor.plateRadiusMm': '33.3333333' }, context), { mbtDeg: 'thirty' }, context)
+    const { state, context: turned } = turnUnits(typed, context, 'us')
+    expect(state.values['rotor.plateRadiusMm']).toBe('1.31234')
+    expect(state.values.mbtDeg).toBe('thirty')
+    expect(state.errors.mbtDeg).toMatch(/MBT/)
+    expect(state.sheet.rotor.plateRadiusMm).toBe(33.3333333)
+    expect(turnUnits(state, turned, 'metric').state.values['rotor.plateRadiusMm']).toBe('33.3333')
   })
   test('fields that drive a finding outside its limit are flagged where they are typed', () => {
     const late = editLive(start(), { 'backup.fixed.deg': '2', 'primary.retardBelowRpm': '760' }, context)

@@ -35,7 +35,7 @@ export default async function ScenarioPage({ params, searchParams }: ScenarioPag
   const system = actor.unitSystem
   return (
     <Workbench
-      key={`${id} ${from ?? ''} ${system}`}
+      key={`${id} ${from ?? ''}`}
       scenario={{ id, code: scenario.code, archived: scenario.archivedAt !== null, canWrite: scenario.canWrite, canRelease: scenario.canRelease, releasedRevision: scenario.releasedRevision }}
       engine={{ id: engine.id, name: engine.name, spec: engine.spec, version: engine.version }}
       engineChanged={scenario.engineChanged}
