@@ -87,7 +87,7 @@ describe('fitTimingParabola', () => {
   it('refuses readings that make no parabola with a top', () => {
     const of = (points: unknown) => () => fitTimingParabola(points as never)
     for (const bad of [undefined, null, [], 'x', {}, offParabola.slice(0, 2)]) expectCalcError(of(bad), 'points')
-    expectCalcError(of([20, 30, 30, 20].map((sparkDeg) => ({ sparkDeg, torque: sparkDeg }))), 'points')
+    expect(expectCalcError(of([20, 30, 30, 20].map((sparkDeg) => ({ sparkDeg, torque: sparkDeg }))), 'points').message).toContain('three different')
     expectCalcError(of([{ sparkDeg: 20, torque: 1 }, null, { sparkDeg: 30, torque: 1 }]), 'points.1')
     expectCalcError(of([{ sparkDeg: 20, torque: 1 }, { sparkDeg: 25, torque: '1' }, { sparkDeg: 30, torque: 1 }]), 'points.1.torque')
     expectCalcError(of([{ sparkDeg: 20, torque: 1 }, { sparkDeg: 25, torque: 1 }, { torque: 1 }]), 'points.2.sparkDeg')

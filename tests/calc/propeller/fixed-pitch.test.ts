@@ -75,7 +75,11 @@ describe('fixedPitchOperatingPoint', () => {
     const last = at({ powerCurve: flat(81, 1000, 2780) })
     expect(last).toEqual({ rpm: 2780, kw: 81 })
     // Stated at other conditions, the load at the end differs from the power in its last digit only.
-    for (const fraction of [0.7, 0.83, 0.91]) expectClose(at({ powerCurve: flat(81, 1000, 2780), fraction, load: { ...load, kw: 81 * fraction, densityRatio: 0.7 }, densityRatio: 0.7 }).rpm, 2780, { rel: 1e-12 })
+    for (let i = 1; i <= 200; i += 1) {
+      const [fraction, densityRatio] = [0.3 + i / 300, 0.5 + i / 500]
+      const stated = { rpm: 2780, kw: 81 * fraction * 0.9 / densityRatio, densityRatio: 0.9 }
+      expectClose(at({ powerCurve: flat(81, 1000, 2780), fraction, load: stated, densityRatio }).rpm, 2780, { rel: 1e-12 })
+    }
     const first = at({ powerCurve: flat(81, 2780, 3000) })
     expect(first).toEqual({ rpm: 2780, kw: 81 })
     expect(at({ powerCurve: flat(81, 2780, 3000), fraction: () => 1 })).toEqual(first)
