@@ -6,7 +6,7 @@ export class FetchProblem extends Error {
   }
 }
 
-const noConnection = 'There is no connection just now.'
+export const noConnection = 'There is no connection just now.'
 
 const sentenceOf = (body: unknown): string | null => {
   const error = typeof body === 'object' && body !== null && 'error' in body ? body.error : null

@@ -1,8 +1,8 @@
 'use client'
 
-import { useEffect, useState } from 'react'
+import { useEffect, useState, useSyncExternalStore } from 'react'
 import useSWR from 'swr'
-import { fetchJson, FetchProblem } from './fetch-json'
+import { fetchJson, FetchProblem, noConnection } from './fetch-json'
 
 export interface Fresh<T> {
   data: T
@@ -12,6 +12,17 @@ export interface Fresh<T> {
   readAt: Date | null
   retry: () => void
 }
+
+const watchConnection = (changed: () => void) => {
+  window.addEventListener('online', changed)
+  window.addEventListener('offline', changed)
+  return () => {
+    window.removeEventListener('online', changed)
+    window.removeEventListener('offline', changed)
+  }
+}
+
+const offline = new FetchProblem(noConnection)
 
 /**
  * A list as the server drew it, kept fresh from its GET route: once after the page has come (a page the browser kept may be old),
@@ -25,6 +36,8 @@ export function useFresh<T>(url: string, initial: T): Fresh<T> {
   useEffect(() => {
     void mutate(initial, { revalidate: true })
   }, [initial, mutate])
-  const problem = error === undefined || error === null ? null : error instanceof FetchProblem ? error : new FetchProblem('The list could not be read.')
-  return { data: data ?? initial, problem, readAt, retry: () => void mutate() }
+  // Without a connection nothing is even tried, so no error would come of it.
+  const isOnline = useSyncExternalStore(watchConnection, () => navigator.onLine, () => true)
+  const failed = error === undefined || error === null ? null : error instanceof FetchProblem ? error : new FetchProblem('The list could not be read.')
+  return { data: data ?? initial, problem: isOnline ? failed : offline, readAt, retry: () => void mutate() }
 }

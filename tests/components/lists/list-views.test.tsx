@@ -1,4 +1,4 @@
-import { render, screen, waitFor, within } from '@testing-library/react'
+import { act, render, screen, waitFor, within } from '@testing-library/react'
 import userEvent from '@testing-library/user-event'
 import { SWRConfig } from 'swr'
 import type { ReactElement } from 'react'
@@ -77,6 +77,19 @@ describe('the list of scenarios', () => {
     await userEvent.click(screen.getByRole('button', { name: 'Try again' }))
     expect(await screen.findByRole('link', { name: 'Scenario 2' })).toBeVisible()
     expect(screen.queryByText(/Not refreshed/)).toBeNull()
+  })
+
+  test('as soon as the connection goes it is said, before anything is tried', async () => {
+    answers(json(list([row(1)])))
+    draw(scenarios(list([row(1)])))
+    await waitFor(() => expect(fetch).toHaveBeenCalled())
+    const online = vi.spyOn(navigator, 'onLine', 'get').mockReturnValue(false)
+    act(() => void window.dispatchEvent(new Event('offline')))
+    expect(screen.getByText(/There is no connection just now/)).toBeVisible()
+    online.mockReturnValue(true)
+    act(() => void window.dispatchEvent(new Event('online')))
+    expect(screen.queryByText(/There is no connection just now/)).toBeNull()
+    online.mockRestore()
   })
 
   test('a session that ended leads to the sign-in, a refusal is told in its own words', async () => {
