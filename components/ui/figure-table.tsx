@@ -2,11 +2,11 @@ import { memo } from 'react'
 import { ChannelChip } from './channel-chip'
 import { cellText, type FigureData } from './figure-data'
 
-/** The numbers behind a drawing. Hidden from sight it is still read. */
-export const FigureTable = memo(function FigureTable({ data, hidden }: { data: FigureData, hidden: boolean }) {
+/** The numbers behind a drawing. Out of sight, in a clipped box, it is still read. */
+export const FigureTable = memo(function FigureTable({ data }: { data: FigureData }) {
   const hits = new Set(data.hits)
   return (
-    <table className={hidden ? 'sr' : 'led'}>
+    <table className="led">
       <caption className="sr">{data.caption}</caption>
       <thead>
         <tr>

@@ -49,8 +49,8 @@ export function Figure({ title, level = 3, sentence, data, csvName, keys, classN
     <figure className={clsx('figure', className)} onKeyDown={onKeyDown}>
       {title ? <div className="fighead"><Heading>{title}</Heading></div> : null}
       {asTable ? null : <div role="img" aria-label={sentence}>{children}</div>}
-      <div className={asTable ? 'figtable' : undefined} tabIndex={asTable ? 0 : undefined} role={asTable ? 'region' : undefined} aria-label={asTable ? data.caption : undefined}>
-        <FigureTable data={settled} hidden={!asTable} />
+      <div className={asTable ? 'figtable' : 'sr'} tabIndex={asTable ? 0 : undefined} role={asTable ? 'region' : undefined} aria-label={asTable ? data.caption : undefined}>
+        <FigureTable data={settled} />
       </div>
       {controls}
       <div className="figfoot">

@@ -61,6 +61,8 @@ test('an engine and two channels by hand, read, saved, released, read by others,
   for (const [name, value] of Object.entries(sheet)) await expect(field(page, name)).toHaveValue(name === 'curvaturePerDeg2' ? '0.00039' : value)
 
   await page.getByRole('link', { name: /^Release a plan/ }).click()
+  await page.waitForURL(/\/release$/)
+  await expect(page.getByRole('heading', { level: 1, name: /^Release / })).toBeVisible()
   for (const reason of await page.getByRole('textbox').all()) await reason.fill('Common practice, released as a check.')
   await page.getByRole('button', { name: 'Release the plan' }).click()
   await page.waitForURL(/\/plans\//)

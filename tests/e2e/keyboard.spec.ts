@@ -20,7 +20,7 @@ test('the whole job by keyboard alone: lay out, change, scrub, read the table, s
   const page = await pageOf(browser, 'designer')
   await page.goto('/scenarios/new')
   await tabTo(page, '[name="engineId"]')
-  await page.keyboard.type('Flat six')
+  await page.keyboard.type('J260')
   await tabTo(page, '[name="title"]')
   await page.keyboard.type('By keyboard')
   await page.keyboard.press('Enter')
