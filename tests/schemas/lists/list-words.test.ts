@@ -1,4 +1,4 @@
-import { describe, expect, it } from 'vitest'
+import { describe, expect, it, onTestFinished, vi } from 'vitest'
 import { rolesThatMay } from '@/lib/auth/who-may'
 import { isNarrowed, listAddress, type ListParams } from '@/lib/list-address'
 import { revisionNumber } from '@/lib/schemas/revision-number'
@@ -66,6 +66,9 @@ describe('address of a list', () => {
 
 describe('words around lists', () => {
   it('writes times in UTC and says so, whatever zone it runs in', () => {
+    vi.stubEnv('TZ', 'Asia/Kolkata')
+    onTestFinished(() => void vi.unstubAllEnvs())
+    expect(new Date('2026-12-03T10:42:59.000Z').getHours()).toBe(16)
     expect(timeWords('2026-12-03T10:42:59.000Z')).toBe('3 Dec 2026, 10:42 UTC')
     expect(timeWords('2026-01-31T23:05:00.000-02:00')).toBe('1 Feb 2026, 01:05 UTC')
     expect(dayWords('2026-05-09T00:00:00.000Z')).toBe('9 May 2026')
