@@ -19,6 +19,7 @@ async function retype(page: Page, name: string, text: string): Promise<void> {
 test('the whole job by keyboard alone: lay out, change, scrub, read the table, save, release', async ({ browser }) => {
   const page = await pageOf(browser, 'designer')
   await page.goto('/scenarios/new')
+  await page.locator('[name="engineId"]').waitFor()
   await tabTo(page, '[name="engineId"]')
   await page.keyboard.type('J260')
   await tabTo(page, '[name="title"]')
@@ -41,6 +42,7 @@ test('the whole job by keyboard alone: lay out, change, scrub, read the table, s
 test('saving and releasing by keyboard alone', async ({ browser }) => {
   const page = await pageOf(browser, 'designer')
   await page.goto('/scenarios')
+  await page.locator('main li a').first().waitFor()
   await tabTo(page, 'a[href^="/scenarios/"][href*="-"]')
   await page.keyboard.press('Enter')
   await page.waitForURL(/\/scenarios\/[0-9a-f-]{36}/)
