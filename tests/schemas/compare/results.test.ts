@@ -35,7 +35,7 @@ describe('results side by side', () => {
 
   it('gives key figures in the units of the system', () => {
     expect(row(base, early, 'stagger.full')).toMatchObject({ left: { text: '9.0' }, right: { text: '2.0' }, difference: '−7.0' })
-    expect(row(sampleRevision(5, { backup: { schedule: { kind: 'fixed', deg: 30 }, latencyUs: 0 } }), base, 'backupFirstDeg')?.label).toBe('Backup never first')
+    expect(row(base, sampleRevision(5, { backup: { schedule: { kind: 'fixed', deg: 30 }, latencyUs: 0 } }), 'backupFirstDeg')?.label).toBe('Backup never first')
     const metric = row(base, early, 'power.backup')
     const us = keyRows(base.results, early.results, 'us').flatMap((group) => group.rows).find(({ id }) => id === 'power.backup')
     expect([metric?.unit.symbol, us?.unit.symbol]).toEqual(['kW', 'hp'])
