@@ -22,12 +22,12 @@ export function NewScenarioForm({ action, engines, chosen }: NewScenarioFormProp
   return (
     <form action={submit} noValidate className="mt-4">
       <ErrorSummary title="No scenario was started" formError={failed?.formError} fieldErrors={failed?.fieldErrors} labels={{ title: 'Name', engineId: 'Engine' }} />
-      <InputField layout="stack" label="Name" name="title" maxLength={120} required value={title} onChange={(event) => setTitle(event.target.value)} note="What is tried out, for example “Climb timing for 97 RON”." error={failed?.fieldErrors?.title} />
       <SelectField
         layout="stack" label="Engine" name="engineId" required value={engineId} onChange={(event) => setEngineId(event.target.value)} error={failed?.fieldErrors?.engineId}
-        choices={[{ value: '', label: 'Choose an engine' }, ...engines.map(({ id, name, code }) => ({ value: id, label: `${code}, ${name}` }))]}
+        choices={[{ value: '', label: 'Choose an engine' }, ...engines.map(({ id, name, code }) => ({ value: id, label: `${name}, ${code}` }))]}
         note="The sheet starts with both channels fixed: the primary at the timing the engine’s power was measured with, the backup 8° later. Best torque stands there as a guess until it is typed."
       />
+      <InputField layout="stack" label="Name" name="title" maxLength={120} required value={title} onChange={(event) => setTitle(event.target.value)} note="What is tried out, for example “Climb timing for 97 RON”." error={failed?.fieldErrors?.title} />
       <p className="acts"><Button type="submit" kind="do" pending={pending}>Open the sheet</Button></p>
     </form>
   )

@@ -1,6 +1,6 @@
 import { VerdictMark } from '@/components/ui/verdict-mark'
 import type { VerdictName } from '@/components/ui/verdict'
-import type { Verdict } from '@/lib/calc/limits'
+import type { Verdict } from '@/lib/calc/live'
 
 /** What the counts of an evaluation come to: its worst finding. */
 export const verdictOf = ({ outside, close, within }: Record<Verdict, number>): VerdictName =>

@@ -53,7 +53,7 @@ export function ScenarioListView({ initial, params, engines, isOwn, canLayOutEng
           <ListSearch
             path={path} params={params} label="Search scenarios" placeholder="Name, code, engine"
             selects={[
-              { name: 'engineId', label: 'Engine', choices: [{ value: '', label: 'every engine' }, ...engines.map(({ id, name, code }) => ({ value: id, label: `${code}, ${name}` }))] },
+              { name: 'engineId', label: 'Engine', choices: [{ value: '', label: 'every engine' }, ...engines.map(({ id, name, code }) => ({ value: id, label: `${name}, ${code}` }))] },
               { name: 'sort', label: 'Order', choices: sorts },
             ]}
           />
