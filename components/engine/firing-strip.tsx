@@ -1,4 +1,4 @@
-import type { Firing } from '@/lib/calc/angle/firing-schedule'
+import type { Firing } from '@/lib/calc/live'
 import { formatNumber } from '@/lib/units'
 
 const width = 328

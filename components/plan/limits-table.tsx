@@ -1,5 +1,5 @@
 import { Ledger } from '@/components/ui/ledger'
-import type { Limits } from '@/lib/calc/limits'
+import type { Limits } from '@/lib/calc/live'
 import type { UnitSystem } from '@/lib/units'
 import { limitLine } from '@/lib/words/limits'
 

@@ -3,7 +3,7 @@ import { verdictOf } from '@/components/lists/row-verdict'
 import { TextLink } from '@/components/ui/button'
 import { VerdictMark } from '@/components/ui/verdict-mark'
 import { DegreeWheel } from '@/components/wheel/degree-wheel'
-import { firingSchedule } from '@/lib/calc/angle/firing-schedule'
+import { firingSchedule } from '@/lib/calc/live'
 import type { RevisionDto } from '@/lib/schemas/revision-dto'
 import { headLine } from '@/lib/words/findings'
 

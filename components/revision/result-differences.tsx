@@ -1,7 +1,7 @@
 import { DiffTable, type DiffColumn } from './diff-table'
 import { Num } from '@/components/ui/num'
 import { VerdictMark } from '@/components/ui/verdict-mark'
-import type { ScenarioResult } from '@/lib/calc/scenario/result-types'
+import type { ScenarioResult } from '@/lib/calc/live'
 import { findingRows, keyRows, type ResultRow, type ResultSide } from '@/lib/compare/result-rows'
 import type { UnitSystem } from '@/lib/units'
 

@@ -5,8 +5,7 @@ import { FindingsList } from '@/components/scenario/findings-list'
 import { ResultLedgers } from '@/components/scenario/result-ledgers'
 import { TimingDrawings } from '@/components/scenario/timing-drawings'
 import { Section } from '@/components/ui/section'
-import type { PartName, ScenarioResult } from '@/lib/calc/scenario/result-types'
-import type { Scenario } from '@/lib/calc/scenario/scenario-types'
+import type { PartName, Scenario, ScenarioResult } from '@/lib/calc/live'
 import type { UnitSystem } from '@/lib/units'
 
 const noParts: ReadonlySet<PartName> = new Set()

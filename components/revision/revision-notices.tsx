@@ -1,4 +1,4 @@
-import { calcVersion } from '@/lib/calc/version'
+import { calcVersion } from '@/lib/calc/live'
 import type { RevisionDto } from '@/lib/schemas/revision-dto'
 import { noticeWords } from '@/lib/words/parts'
 

@@ -1,5 +1,4 @@
-import { displacementCc } from '@/lib/calc/scenario/power-parts'
-import type { Engine } from '@/lib/calc/scenario/scenario-types'
+import { displacementCc, type Engine } from '@/lib/calc/live'
 import { formatQuantityText, type UnitSystem } from '@/lib/units'
 
 /** "6 cylinders, 2596 cc, 90.0 mm × 68.0 mm" */

@@ -1,4 +1,4 @@
-import type { Notice } from '@/lib/calc/notice'
+import type { Notice } from '@/lib/calc/live'
 import { noticeWords } from '@/lib/words/parts'
 
 interface SheetNoticesProps {

@@ -3,7 +3,7 @@
 import { memo } from 'react'
 import { ChannelChip } from '@/components/ui/channel-chip'
 import { Stamp } from '@/components/ui/stamp'
-import type { ScenarioResult } from '@/lib/calc/scenario/result-types'
+import type { ScenarioResult } from '@/lib/calc/live'
 import type { UnitSystem } from '@/lib/units'
 import { findingLead, findingValue, headLine, letterOf, limitWords } from '@/lib/words/findings'
 

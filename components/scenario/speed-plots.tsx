@@ -3,8 +3,7 @@
 import { memo, useMemo } from 'react'
 import { LinePlot } from '@/components/plots/line-plot'
 import type { FigureData } from '@/components/ui/figure-data'
-import type { PartName, ScenarioParts } from '@/lib/calc/scenario/result-types'
-import type { Scenario } from '@/lib/calc/scenario/scenario-types'
+import type { PartName, Scenario, ScenarioParts } from '@/lib/calc/live'
 import { formatQuantity, unitOf, type QuantityKind, type UnitSystem } from '@/lib/units'
 import { PartView } from './stale-part'
 

@@ -1,6 +1,6 @@
 import type { ReactNode } from 'react'
 import { WithheldNote } from '@/components/ui/note'
-import type { Part, PartName } from '@/lib/calc/scenario/result-types'
+import type { Part, PartName } from '@/lib/calc/live'
 import { partTitle, withheldWords } from '@/lib/words/parts'
 
 interface PartViewProps<T> {

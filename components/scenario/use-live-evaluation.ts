@@ -1,7 +1,7 @@
 'use client'
 
 import { useCallback, useEffect, useReducer } from 'react'
-import { loadFormulaParser } from '@/lib/calc/advance/load-formula-parser'
+import { loadFormulaParser } from '@/lib/calc/live'
 import type { FormValues } from '@/lib/schemas/field'
 import type { UnitSystem } from '@/lib/units'
 import { editLive, turnUnits, type LiveContext, type LiveState } from '@/lib/workbench/live-evaluation'

@@ -1,4 +1,4 @@
-import type { ScenarioResult } from '../calc/scenario/result-types'
+import type { ScenarioResult } from '../calc/live'
 import { formatQuantityText, type UnitSystem } from '../units'
 import type { FindingChanges } from './finding-changes'
 

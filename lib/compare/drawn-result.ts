@@ -1,7 +1,6 @@
 // With the formula parser: a schedule may be a formula.
 import '../calc/index'
-import { evaluateScenario } from '../calc/scenario/evaluate-scenario'
-import type { ScenarioResult } from '../calc/scenario/result-types'
+import { evaluateScenario, type ScenarioResult } from '../calc/live'
 import type { RevisionDto } from '../schemas/revision-dto'
 
 /**

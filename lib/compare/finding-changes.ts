@@ -1,5 +1,4 @@
-import type { Verdict } from '../calc/limits'
-import type { Finding, ScenarioResult } from '../calc/scenario/result-types'
+import type { Finding, ScenarioResult, Verdict } from '../calc/live'
 
 /** A finding whose verdict is another than before; `now` null: it is judged no longer, `was` null: it was not judged before. */
 export interface FindingChange {

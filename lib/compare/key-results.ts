@@ -1,5 +1,4 @@
-import type { LimitUnit } from '../calc/limits'
-import type { ChannelName, MarkedSpeed, Part, PartError, PartName, ScenarioResult } from '../calc/scenario/result-types'
+import type { ChannelName, LimitUnit, MarkedSpeed, Part, PartError, PartName, ScenarioResult } from '../calc/live'
 import { formatQuantityText, type QuantityKind, type UnitSystem } from '../units'
 
 /** One figure of an evaluation, in base units. */

@@ -1,4 +1,4 @@
-import type { CurvePoint, ScenarioResult } from '../calc/scenario/result-types'
+import type { CurvePoint, ScenarioResult } from '../calc/live'
 
 export interface OverlaidCurve {
   channel: 'A' | 'B'

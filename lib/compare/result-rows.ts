@@ -1,5 +1,4 @@
-import type { Verdict } from '../calc/limits'
-import type { ChannelName, Finding, ScenarioResult } from '../calc/scenario/result-types'
+import type { ChannelName, Finding, ScenarioResult, Verdict } from '../calc/live'
 import { formatQuantity, unitOf, type QuantityKind, type UnitSystem } from '../units'
 import { findingTitle, findingValue, limitWords } from '../words/findings'
 import { keyResults, kindOfLimitUnit, type KeyResult } from './key-results'

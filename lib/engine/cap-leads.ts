@@ -1,4 +1,4 @@
-import type { Rotation } from '../calc/scenario/scenario-types'
+import type { Rotation } from '../calc/live'
 
 /** Cylinder at each terminal, clockwise from above, when the rotor of this rotation serves them in firing order. */
 export const capFromOrder = (firingOrder: readonly number[], rotation: Rotation): number[] => {

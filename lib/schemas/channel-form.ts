@@ -1,4 +1,4 @@
-import type { Channel, Schedule } from '../calc/advance/advance-types'
+import type { Channel, Schedule } from '../calc/live'
 import { formatInput, formatMatrix, formatTable, type Matrix, type QuantityKind, type UnitSystem } from '../units'
 import type { FormValues } from './field'
 import type { ReadFields } from './read-fields'

@@ -1,5 +1,5 @@
 import { z } from 'zod'
-import type { Engine } from '../calc/scenario/scenario-types'
+import type { Engine } from '../calc/live'
 
 /** A time as ISO 8601 in UTC: the same text from a page and from a route. */
 export const isoTime = z.iso.datetime()

@@ -1,4 +1,4 @@
-import type { Engine } from '../calc/scenario/scenario-types'
+import type { Engine } from '../calc/live'
 import { formatInput, formatTable, type UnitSystem } from '../units'
 import { engineFields } from './engine-fields'
 import { engineInput, type EngineInput } from './engine'

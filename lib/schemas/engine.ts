@@ -1,5 +1,5 @@
 import { z } from 'zod'
-import type { Engine } from '../calc/scenario/scenario-types'
+import type { Engine } from '../calc/live'
 import { engineFields } from './engine-fields'
 import { isAscending, numbersOf } from './number-schema'
 

@@ -1,6 +1,5 @@
 import { z } from 'zod'
-import type { Limits } from '../calc/limits'
-import type { storedResult } from '../calc/scenario/stored-result'
+import type { Limits, storedResult } from '../calc/live'
 import { isoTime, storedSpec } from './engine-dto'
 import { scenarioSheet } from './scenario'
 

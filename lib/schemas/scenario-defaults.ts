@@ -1,4 +1,4 @@
-import type { Engine, ScenarioSheet } from '../calc/scenario/scenario-types'
+import type { Engine, ScenarioSheet } from '../calc/live'
 
 /** Middle of the published curvatures (1.8e-4 to 4e-4 per degree²). */
 const defaultCurvature = 3e-4

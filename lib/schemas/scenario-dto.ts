@@ -1,5 +1,5 @@
 import { z } from 'zod'
-import type { ScenarioResult } from '../calc/scenario/result-types'
+import type { ScenarioResult } from '../calc/live'
 import { engineDto, isoTime, storedSpec } from './engine-dto'
 import { personDto, revisionDto, verdictCounts } from './revision-dto'
 import { scenarioSheet } from './scenario'

@@ -1,4 +1,4 @@
-import type { ScenarioSheet } from '../calc/scenario/scenario-types'
+import type { ScenarioSheet } from '../calc/live'
 import { formatInput, type UnitSystem } from '../units'
 import { channelToForm, isScheduleKind, numbersOfChannel, readChannel } from './channel-form'
 import { fieldIndex, type FieldErrors, type FormValues } from './field'

@@ -1,5 +1,5 @@
 import { z } from 'zod'
-import type { ScenarioSheet } from '../calc/scenario/scenario-types'
+import type { ScenarioSheet } from '../calc/live'
 import { scenarioSheet, scenarioTitle } from './scenario'
 
 /** Callers hold the library's own read-only type; the schema checks it all the same. */

@@ -1,6 +1,5 @@
 import { z } from 'zod'
-import type { Channel } from '../calc/advance/advance-types'
-import type { ScenarioSheet } from '../calc/scenario/scenario-types'
+import type { Channel, ScenarioSheet } from '../calc/live'
 import { isAscending, numbersOf } from './number-schema'
 import { maxPitches, scenarioFields, type ChannelPrefix } from './scenario-fields'
 

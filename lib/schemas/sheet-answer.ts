@@ -1,5 +1,4 @@
-import type { ScenarioResult } from '../calc/scenario/result-types'
-import type { ScenarioSheet } from '../calc/scenario/scenario-types'
+import type { ScenarioResult, ScenarioSheet } from '../calc/live'
 import type { ActionState } from '../errors'
 import type { FormValues } from './field'
 import type { RevisionDto } from './revision-dto'

@@ -1,5 +1,4 @@
-import type { LimitUnit, Verdict } from '../calc/limits'
-import type { Finding } from '../calc/scenario/result-types'
+import type { Finding, LimitUnit, Verdict } from '../calc/live'
 import { formatQuantity, formatQuantityText, type FormattedQuantity, type QuantityKind, type UnitSystem } from '../units'
 
 /** Which kind of quantity a finding's figures are, for the person's units. */

@@ -1,4 +1,4 @@
-import type { Limit } from '../calc/limits'
+import type { Limit } from '../calc/live'
 import type { UnitSystem } from '../units'
 import { findingTitle, limitOrigin, limitWords } from './findings'
 

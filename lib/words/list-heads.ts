@@ -1,4 +1,4 @@
-import type { Verdict } from '../calc/limits'
+import type { Verdict } from '../calc/live'
 
 type Counted = { counts: Record<Verdict, number> }
 

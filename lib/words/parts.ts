@@ -1,5 +1,4 @@
-import type { Notice } from '../calc/notice'
-import type { PartError, PartName } from '../calc/scenario/result-types'
+import type { Notice, PartError, PartName } from '../calc/live'
 
 export const partTitle: Record<PartName, string> = {
   speeds: 'Marked speeds',

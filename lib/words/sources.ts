@@ -1,4 +1,4 @@
-import type { Source } from '../calc/sources'
+import type { Source } from '../calc/live'
 
 /** A publication in a line, with how far it was traced. */
 export function sourceWords({ id, author, year, provenance }: Source): string {

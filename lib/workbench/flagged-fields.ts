@@ -1,4 +1,4 @@
-import type { Finding } from '../calc/scenario/result-types'
+import type { Finding } from '../calc/live'
 import type { FormValues } from '../schemas/field'
 import { isScheduleKind } from '../schemas/channel-form'
 import { fieldOfScenarioPath } from '../schemas/scenario-form'

@@ -2,7 +2,7 @@ import 'server-only'
 // The index, not ./live: it brings the formula parser.
 import '@/lib/calc/index'
 import type { Actor } from '@/lib/auth/actor'
-import { evaluateScenario } from '@/lib/calc/scenario/evaluate-scenario'
+import { evaluateScenario } from '@/lib/calc/live'
 import { evaluationDto, type EvaluationDto } from '@/lib/schemas/scenario-dto'
 import { scenarioEvaluateInput, type ScenarioEvaluateInput } from '@/lib/schemas/scenario-input'
 import { authorise } from '../support/authorise'

@@ -1,7 +1,7 @@
 import 'server-only'
 import { isDeepStrictEqual } from 'node:util'
 import type { Actor } from '@/lib/auth/actor'
-import { calcVersion } from '@/lib/calc/version'
+import { calcVersion } from '@/lib/calc/live'
 import { AppError } from '@/lib/errors'
 import type { RevisionDto } from '@/lib/schemas/revision-dto'
 import { scenarioSaveInput, type ScenarioSaveInput } from '@/lib/schemas/scenario-input'

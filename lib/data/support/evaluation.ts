@@ -1,10 +1,7 @@
 import 'server-only'
 // The index, not ./live: it brings the formula parser.
 import '@/lib/calc/index'
-import { defaultLimits } from '@/lib/calc/limits'
-import { evaluateScenario, inputErrors } from '@/lib/calc/scenario/evaluate-scenario'
-import { storedResult } from '@/lib/calc/scenario/stored-result'
-import type { Scenario } from '@/lib/calc/scenario/scenario-types'
+import { defaultLimits, evaluateScenario, inputErrors, type Scenario, storedResult } from '@/lib/calc/live'
 import { AppError } from '@/lib/errors'
 
 /** The columns of a revision that the library fills. Inputs it cannot compute with are told at their fields. */

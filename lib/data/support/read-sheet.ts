@@ -1,5 +1,5 @@
 import 'server-only'
-import type { ScenarioSheet } from '@/lib/calc/scenario/scenario-types'
+import type { ScenarioSheet } from '@/lib/calc/live'
 import { AppError } from '@/lib/errors'
 import { scenarioSheet, sheetVersion } from '@/lib/schemas/scenario'
 import { toDto } from './dto'
