@@ -27,7 +27,7 @@ export const missingSentence = (what, line, debian) =>
 async function apt(...args) {
   const outcome = await runToEnd('apt-get', ['-q', '-o', 'DPkg::Lock::Timeout=120', ...args], { minutes: 15, env: { DEBIAN_FRONTEND: 'noninteractive' } })
   if (outcome.ok) return
-  throw stepFailure(`Installing from Debian (apt-get ${args.join(' ')})`, outcome, 'its own words stand above.', true)
+  throw stepFailure(`Installing from Debian (apt-get ${args.join(' ')})`, outcome, 'its own words stand above.', { download: true })
 }
 
 /**

@@ -21,13 +21,24 @@ export function knownCause(what, tail, download = false) {
  * @param {string} what
  * @param {{ tail: string, timedOut: boolean }} outcome
  * @param {string} otherwise what to do when the cause is none of the known ones
- * @param {boolean} [download]
+ * @param {{ download?: boolean, quote?: boolean }} [how] quote: its one line that names an error belongs in the sentence, the rest is noise
  */
-export function stepFailure(what, { tail, timedOut }, otherwise, download = false) {
+export function stepFailure(what, { tail, timedOut }, otherwise, { download = false, quote = false } = {}) {
   const known = timedOut ? null : knownCause(what, tail, download)
   if (known) return new Failure(known)
+  if (quote && !timedOut) return new Failure(`${what} failed (“${firstError(tail)}”): ${otherwise}`)
   console.error(lastLines(tail))
   return new Failure(timedOut ? `${what} did not end in its time and was stopped: its last words stand above.` : `${what} failed: ${otherwise}`)
+}
+
+/**
+ * The first line that names an error, without the names of error classes before its words.
+ * @param {string} text
+ */
+export function firstError(text) {
+  const lines = text.split('\n').map((line) => line.trim()).filter((line) => line !== '' && !/^at /.test(line))
+  const line = lines.find((each) => /error\b/i.test(each)) ?? lines.at(-1) ?? 'no reason given'
+  return line.replace(/^(\w*(Error|Exception):\s*)+/, '').replace(/\bOriginal error:\s*/, '').replace(/\.$/, '')
 }
 
 /** @param {string} text */
@@ -35,8 +46,8 @@ export const isNetworkTrouble = (text) =>
   /\b(ENOTFOUND|EAI_AGAIN|ECONNREFUSED|ECONNRESET|ETIMEDOUT|ENETUNREACH|EHOSTUNREACH|ERR_SOCKET_TIMEOUT)\b|Temporary failure resolving|Could not resolve|Could not connect|Unable to connect|Failed to fetch|network is unreachable/i.test(text)
 
 /**
- * The last lines of an output, for showing above the sentence.
+ * The last lines of an output, for showing above the sentence; where in the code it happened is no help to the person who starts.
  * @param {string} text
  * @param {number} [lines]
  */
-export const lastLines = (text, lines = 40) => text.trimEnd().split('\n').slice(-lines).join('\n')
+export const lastLines = (text, lines = 40) => text.trimEnd().split('\n').filter((line) => !/^\s+at .*[:(]/.test(line)).slice(-lines).join('\n')

@@ -35,7 +35,7 @@ export async function migrate(database, name) {
     minutes: 10, env: { DATABASE_URL: database.url(name), MIKRO_SNAPSHOT: '' },
   })
   if (!outcome.ok) {
-    throw stepFailure('Bringing the database up to date', outcome, 'the database’s own words stand above, and it was left as it was before the failing migration.')
+    throw stepFailure('Bringing the database up to date', outcome, 'the database is as it was before that migration; start the version that was used before, or report this.', { quote: true })
   }
   return pending.length
 }
@@ -50,5 +50,5 @@ export async function seed(database, name) {
     minutes: 5, env: { DATABASE_URL: database.url(name) },
   })
   if (outcome.ok) return
-  throw stepFailure('Laying in the demo', outcome, 'the words of scripts/seed.ts stand above.')
+  throw stepFailure('Laying in the demo', outcome, 'start again, or begin anew with npm run pg destroy when there is nothing to keep.', { quote: true })
 }

@@ -51,7 +51,7 @@ export async function installPackages(say) {
   const args = ['ci', '--include=dev', '--no-audit', '--no-fund', '--loglevel=error']
   const outcome = await (npm ? runToEnd(process.execPath, [npm, ...args], { minutes: 15 }) : runToEnd('npm', args, { minutes: 15 }))
   if (!outcome.ok) {
-    throw stepFailure('Installing the npm packages', outcome, 'npm’s own words stand above; when they name no cause, remove node_modules and start again.', true)
+    throw stepFailure('Installing the npm packages', outcome, 'npm’s own words stand above; when they name no cause, remove node_modules and start again.', { download: true })
   }
   fs.writeFileSync(stampFile(), stamp)
 }

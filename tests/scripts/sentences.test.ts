@@ -1,5 +1,5 @@
 import { expect, test } from 'vitest'
-import { knownCause } from '@/scripts/lib/failed-step.mjs'
+import { firstError, knownCause, lastLines } from '@/scripts/lib/failed-step.mjs'
 import { Failure, fileSentence, sentenceOf } from '@/scripts/lib/failure.mjs'
 import { lastComplaint, lostPort, otherMajorSentence, startSentence } from '@/scripts/lib/pg-sentences.mjs'
 
@@ -61,4 +61,16 @@ test('an unexpected error shows its first line only, and a failure exactly its s
   expect(sentenceOf(new Error('odd\n    at stack'))).toBe('Something unexpected stopped this command: odd')
   expect(sentenceOf(new Failure('Do this.'))).toBe('Do this.')
   expect(fileSentence({ code: 'EBUSY' })).toBeUndefined()
+})
+
+test('the line that names the error is found, without class names and stack', () => {
+  const tail = `Options:\n  -h help\nMigrationError: Migration Migration1_bad (up) failed: Original error: relation "nowhere" does not exist\n    at Umzug.run (x.js:1:2)\n  code: '42P01'\n`
+  expect(firstError(tail)).toBe('Migration Migration1_bad (up) failed: relation "nowhere" does not exist')
+  expect(firstError('nothing said')).toBe('nothing said')
+  expect(firstError('')).toBe('no reason given')
+})
+
+test('the last lines show no stack', () => {
+  expect(lastLines('one\n    at run (x.js:1:2)\n    at async y (z.js:3:4)\ntwo\n')).toBe('one\ntwo')
+  expect(lastLines('a\nb\nc', 2)).toBe('b\nc')
 })
