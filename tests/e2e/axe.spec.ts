@@ -18,10 +18,12 @@ async function pagesOf(page: Page): Promise<string[]> {
     return found
   }
   const scenario = await firstLink('/scenarios', /^\/scenarios\/[0-9a-f-]{36}/)
+  const reworked = await firstLink('/scenarios?search=97+RON', /^\/scenarios\/[0-9a-f-]{36}/)
   const engine = await firstLink('/engines', /^\/engines\/[0-9a-f-]{36}/)
   const plan = await firstLink('/plans', /^\/plans\/[0-9a-f-]{36}/)
   return [
     '/scenarios', '/scenarios?search=nothing+like+this', '/scenarios/new', scenario, `${scenario}/revisions`, `${scenario}/revisions/1`, `${scenario}/release`,
+    `${reworked}/revisions/compare?left=1&right=2`,
     '/engines', '/engines/new', engine, '/plans', plan, '/nowhere',
   ]
 }

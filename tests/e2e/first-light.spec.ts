@@ -26,7 +26,10 @@ async function enterEngine(page: Page): Promise<void> {
 }
 
 test('an engine and two channels by hand, read, saved, released, read by others, hidden from the other shop', async ({ browser }) => {
-  const page = await pageOf(browser, 'designer')
+  // A session of its own: it is ended below.
+  const page = await (await browser.newContext()).newPage()
+  await page.goto('/sign-in')
+  await typeSignIn(page, 'designer')
   const clean = watch(page)
   await enterEngine(page)
   await page.goto('/scenarios/new')

@@ -21,7 +21,7 @@ test('the whole job by keyboard alone: lay out, change, scrub, read the table, s
   await page.goto('/scenarios/new')
   await page.locator('[name="engineId"]').waitFor()
   await tabTo(page, '[name="engineId"]')
-  await page.keyboard.type('J260')
+  await page.keyboard.type('Flat six')
   await tabTo(page, '[name="title"]')
   await page.keyboard.type('By keyboard')
   await page.keyboard.press('Enter')
