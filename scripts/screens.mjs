@@ -51,7 +51,7 @@ async function run() {
       await page.goto(web.address + address(path))
       await page.waitForLoadState('networkidle')
       await prepare()
-      await page.screenshot({ path: inRoot('docs', 'screens', `${title}-${width}-${theme}.png`), fullPage: width !== 1440 || title === 'sheet' })
+      await page.screenshot({ path: inRoot('docs', 'screens', `${title}-${width}-${theme}.jpg`), type: 'jpeg', quality: 80, fullPage: width !== 1440 || title === 'sheet' })
     }
     console.log(title)
   }

@@ -1,4 +1,5 @@
 import type { Metadata } from 'next'
+import { ProblemNote } from '@/components/lists/problem-note'
 import { ScenarioMore } from '@/components/scenario/scenario-more'
 import { Workbench } from '@/components/scenario/workbench'
 import { can } from '@/lib/auth/permissions'
@@ -14,7 +15,7 @@ import { saveSheet } from './actions'
 
 interface ScenarioPageProps {
   params: Promise<{ id: string }>
-  searchParams: Promise<{ from?: string | string[] }>
+  searchParams: Promise<{ from?: string | string[], problem?: string | string[] }>
 }
 
 export async function generateMetadata({ params }: ScenarioPageProps): Promise<Metadata> {
@@ -25,7 +26,7 @@ export async function generateMetadata({ params }: ScenarioPageProps): Promise<M
 
 /** The workbench. `?from=3` fills the form from an older revision; saving makes it the newest. */
 export default async function ScenarioPage({ params, searchParams }: ScenarioPageProps) {
-  const [actor, { id }, { from }] = await Promise.all([requireActor(), params, searchParams])
+  const [actor, { id }, { from, problem }] = await Promise.all([requireActor(), params, searchParams])
   const scenario = await pageData(() => getScenario(actor, id))
   const { engine, revision } = scenario
   const canArchive = can(actor, 'scenario.archive') || (can(actor, 'scenario.archiveOwn') && scenario.owner.id === actor.userId)
@@ -34,23 +35,26 @@ export default async function ScenarioPage({ params, searchParams }: ScenarioPag
   const { result } = await pageData(() => evaluateForActor(actor, { engineId: engine.id, sheet: shown.sheet }))
   const system = actor.unitSystem
   return (
-    <Workbench
-      key={`${id} ${from ?? ''}`}
-      scenario={{ id, code: scenario.code, archived: scenario.archivedAt !== null, canWrite: scenario.canWrite, canRelease: scenario.canRelease, releasedRevision: scenario.releasedRevision }}
-      engine={{ id: engine.id, name: engine.name, spec: engine.spec, version: engine.version }}
-      engineChanged={scenario.engineChanged}
-      canOpenEngine={can(actor, 'engine.read')}
-      saved={{
-        number: revision.number, at: revision.createdAt, by: revision.author.name,
-        values: scenarioToForm(revision.title, revision.sheet, system), filledFrom: shown.number,
-      }}
-      values={scenarioToForm(shown.title, shown.sheet, system)}
-      sheet={shown.sheet}
-      result={result}
-      limits={defaultLimits}
-      system={system}
-      save={saveSheet.bind(null, id)}
-      more={<ScenarioMore id={id} archived={scenario.archivedAt !== null} canArchive={canArchive} duplicate={duplicateScenario} archive={archiveScenario} restore={restoreScenario} />}
-    />
+    <>
+      {problem ? <div className="body pb-0!"><ProblemNote problem={problem} what="scenario" /></div> : null}
+      <Workbench
+        key={`${id} ${from ?? ''}`}
+        scenario={{ id, code: scenario.code, archived: scenario.archivedAt !== null, canWrite: scenario.canWrite, canRelease: scenario.canRelease, releasedRevision: scenario.releasedRevision }}
+        engine={{ id: engine.id, name: engine.name, spec: engine.spec, version: engine.version }}
+        engineChanged={scenario.engineChanged}
+        canOpenEngine={can(actor, 'engine.read')}
+        saved={{
+          number: revision.number, at: revision.createdAt, by: revision.author.name,
+          values: scenarioToForm(revision.title, revision.sheet, system), filledFrom: shown.number,
+        }}
+        values={scenarioToForm(shown.title, shown.sheet, system)}
+        sheet={shown.sheet}
+        result={result}
+        limits={defaultLimits}
+        system={system}
+        save={saveSheet.bind(null, id)}
+        more={<ScenarioMore id={id} archived={scenario.archivedAt !== null} canArchive={canArchive} duplicate={duplicateScenario} archive={archiveScenario} restore={restoreScenario} />}
+      />
+    </>
   )
 }
