@@ -4,7 +4,7 @@ import { useMemo, useState } from 'react'
 import { AdvancePlot } from '@/components/plots/advance-plot'
 import type { AdvanceChannel, SpeedMark } from '@/components/plots/advance-curves'
 import { DegreeWheel } from '@/components/wheel/degree-wheel'
-import { dependsOnPressure, findSpeedPoint, firingSchedule, type Engine, type PartName, type Scenario, type ScenarioResult, type ScenarioSheet, type SpeedPoint } from '@/lib/calc/live'
+import { dependsOnPressure, findSpeedPoint, firingSchedule, type Engine, type PartName, type Scenario, type ScenarioResult, type SpeedPoint } from '@/lib/calc/live'
 import { formatQuantityText, type UnitSystem } from '@/lib/units'
 import { scheduleKinds } from '@/lib/schemas/scenario-fields'
 import { PartView } from './stale-part'
@@ -24,16 +24,16 @@ interface TimingDrawingsProps {
 const kindName = (kind: string) => scheduleKinds.find(({ value }) => value === kind)?.label ?? kind
 const roundUp = (rpm: number) => Math.ceil(rpm / 100) * 100
 
-function speedMarks({ engine, sheet }: Scenario): SpeedMark[] {
-  return [{ label: 'crank', rpm: engine.crankingRpm }, { label: 'idle', rpm: engine.idleRpm }, { label: 'run-up', rpm: sheet.runUpRpm }, { label: 'full power', rpm: engine.maxRpm }]
+function speedMarks(engine: Engine, runUpRpm: number): SpeedMark[] {
+  return [{ label: 'crank', rpm: engine.crankingRpm }, { label: 'idle', rpm: engine.idleRpm }, { label: 'run-up', rpm: runUpRpm }, { label: 'full power', rpm: engine.maxRpm }]
 }
 
-function drawnChannels({ parts }: ScenarioResult, sheet: ScenarioSheet): AdvanceChannel[] {
-  if (!parts.curves.ok) return []
-  const { rising, falling } = parts.curves
+function drawnChannels(curves: ScenarioResult['parts']['curves'], primaryKind: string, backupKind: string): AdvanceChannel[] {
+  if (!curves.ok) return []
+  const { rising, falling } = curves
   return [
-    { channel: 'A', name: `A primary, ${kindName(sheet.primary.schedule.kind)}`, rising: rising.primary, ...(falling.primary ? { falling: falling.primary } : {}) },
-    { channel: 'B', name: `B backup, ${kindName(sheet.backup.schedule.kind)}`, rising: rising.backup, ...(falling.backup ? { falling: falling.backup } : {}) },
+    { channel: 'A', name: `A primary, ${kindName(primaryKind)}`, rising: rising.primary, ...(falling.primary ? { falling: falling.primary } : {}) },
+    { channel: 'B', name: `B backup, ${kindName(backupKind)}`, rising: rising.backup, ...(falling.backup ? { falling: falling.backup } : {}) },
   ]
 }
 
@@ -47,8 +47,12 @@ export function TimingDrawings({ scenario, result, deferred, stale, system, name
   const rpm = chosen ?? engine.maxRpm
   const point = useMemo(() => findSpeedPoint(scenario, rpm), [scenario, rpm])
   const cylinders = useMemo(() => cylindersOf(engine), [engine])
-  const channels = useMemo(() => drawnChannels(deferred, sheet), [deferred, sheet])
-  const marks = useMemo(() => speedMarks(scenario), [scenario])
+  // The curves are redrawn when they change, a frame after the wheel, and not for another reason.
+  const { curves } = deferred.parts
+  const primaryKind = sheet.primary.schedule.kind
+  const backupKind = sheet.backup.schedule.kind
+  const channels = useMemo(() => drawnChannels(curves, primaryKind, backupKind), [curves, primaryKind, backupKind])
+  const marks = useMemo(() => speedMarks(engine, sheet.runUpRpm), [engine, sheet.runUpRpm])
   const followsPressure = dependsOnPressure(sheet.primary) || dependsOnPressure(sheet.backup)
   const fullPressure = formatQuantityText(sheet.manifold.fullKpa, 'pressure', system)
   const unreadable = stale.has('curves')
