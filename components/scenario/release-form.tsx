@@ -9,7 +9,7 @@ import { Section } from '@/components/ui/section'
 import type { Finding } from '@/lib/calc/live'
 import type { ActionState } from '@/lib/errors'
 import type { UnitSystem } from '@/lib/units'
-import { findingTitle, findingValue, letterOf, limitWords } from '@/lib/words/findings'
+import { findingLead, findingTitle, findingValue, letterOf, limitWords } from '@/lib/words/findings'
 
 interface ReleaseFormProps {
   title: string
@@ -22,7 +22,7 @@ interface ReleaseFormProps {
 const labelOf = (finding: Finding, system: UnitSystem) => {
   const value = findingValue(finding, system)
   const amount = value ? `${value.text}${value.unit === '°' ? '°' : value.unit ? ` ${value.unit}` : ''}` : 'none'
-  return `${findingTitle(finding, system)}${finding.channel ? `, ${letterOf(finding.channel)}` : ''}: ${amount}, ${limitWords(finding, system)}`
+  return `${finding.channel ? `${letterOf(finding.channel)}: ` : ''}${findingLead(finding, system)} ${amount}; ${limitWords(finding, system)}`
 }
 
 /** A reason in writing for each finding outside its limit, then the release. */
