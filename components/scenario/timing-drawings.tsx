@@ -3,7 +3,7 @@
 import { useMemo, useState } from 'react'
 import { AdvancePlot } from '@/components/plots/advance-plot'
 import type { AdvanceChannel, SpeedMark } from '@/components/plots/advance-curves'
-import { DegreeWheel } from '@/components/wheel/degree-wheel'
+import { WheelFigure } from '@/components/wheel/wheel-figure'
 import { dependsOnPressure, findSpeedPoint, firingSchedule, type Engine, type PartName, type Scenario, type ScenarioResult, type SpeedPoint } from '@/lib/calc/live'
 import { formatQuantityText, type UnitSystem } from '@/lib/units'
 import { scheduleKinds } from '@/lib/schemas/scenario-fields'
@@ -59,8 +59,8 @@ export function TimingDrawings({ scenario, result, deferred, stale, system, name
   return (
     <div className="two">
       <div className={unreadable ? 'stale' : undefined}>
-        <DegreeWheel
-          rpm={rpm} rotation={engine.crankRotation} cylindersAt={cylinders}
+        <WheelFigure
+          csvName={`${name}-wheel`} rpm={rpm} rotation={engine.crankRotation} cylindersAt={cylinders}
           primaryDeg={point?.primaryDeg ?? null} backupDeg={point?.backupDeg ?? null} staggerDeg={point?.staggerDeg ?? null} staggerMs={point?.staggerMs ?? null}
         />
         <SpeedLine point={point} system={system} />
