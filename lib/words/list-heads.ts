@@ -27,7 +27,7 @@ export function scenarioHead(rows: readonly Counted[], { state, isFiltered, isPa
   if (state === 'outside') return `${some} ${plural(count, 'scenario')} outside a limit`
   const outside = rows.filter((row) => row.counts.outside > 0).length
   const of = `${isPart ? 'these ' : ''}${isOwn ? 'your ' : ''}${count} ${plural(count, 'scenario')}`
-  if (outside === 0) return `${isPart ? 'These ' : ''}${count}${isOwn ? ' of your' : ''} ${plural(count, 'scenario')}, none outside a limit`
+  if (outside === 0) return isOwn && !isPart ? `Your ${plural(count, 'scenario', `${count} scenarios`)}, none outside a limit` : `${isPart ? 'These ' : ''}${count} ${plural(count, 'scenario')}, none outside a limit`
   return `${outside} of ${of} outside a limit`
 }
 

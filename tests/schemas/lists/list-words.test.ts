@@ -17,7 +17,8 @@ describe('head of the list of scenarios', () => {
     expect(scenarioHead(rows(1), plain)).toBe('1 of 1 scenario outside a limit')
     expect(scenarioHead(rows(0, 0), plain)).toBe('2 scenarios, none outside a limit')
     expect(scenarioHead(rows(1, 0), { ...plain, isOwn: true })).toBe('1 of your 2 scenarios outside a limit')
-    expect(scenarioHead(rows(0, 0), { ...plain, isOwn: true })).toBe('2 of your scenarios, none outside a limit')
+    expect(scenarioHead(rows(0, 0), { ...plain, isOwn: true })).toBe('Your 2 scenarios, none outside a limit')
+    expect(scenarioHead(rows(0), { ...plain, isOwn: true })).toBe('Your scenario, none outside a limit')
   })
 
   it('does not count a page as the whole', () => {
