@@ -1,7 +1,7 @@
 /** Median time of one whole evaluation, ms; printed as JSON. */
 import '../lib/calc/index'
 import { evaluateScenario } from '../lib/calc/scenario/evaluate-scenario'
-import { sampleEngine, sampleSheet } from '../tests/schemas/support/samples'
+import { sampleEngine, sampleSheet } from '../tests/support/samples'
 
 const runs = 400
 const scenarios = [

@@ -1,6 +1,6 @@
 import { describe, expect, test } from 'vitest'
 import { engineToForm, formToEngine } from '@/lib/schemas/engine-form'
-import { sampleEngine } from './support/samples'
+import { sampleEngine } from '@/tests/support/samples'
 
 const engine = sampleEngine()
 const form = (change: Record<string, string> = {}) => ({ ...engineToForm('Flat six', 'J260', engine, 'metric'), ...change })

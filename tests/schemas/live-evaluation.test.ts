@@ -5,7 +5,7 @@ import { evaluateScenario } from '@/lib/calc/scenario/evaluate-scenario'
 import { scenarioToForm } from '@/lib/schemas/scenario-form'
 import { editLive, startLive, turnUnits } from '@/lib/workbench/live-evaluation'
 import { flaggedFields } from '@/lib/workbench/flagged-fields'
-import { sampleEngine, sampleSheet } from './support/samples'
+import { sampleEngine, sampleSheet } from '@/tests/support/samples'
 
 const context = { engine: sampleEngine(), limits: defaultLimits, system: 'metric' as const, base: sampleSheet() }
 const start = () => startLive(scenarioToForm('Climb', context.base, 'metric'), context.base, evaluateScenario({ engine: context.engine, sheet: context.base }))

@@ -1,7 +1,7 @@
 import { describe, expect, test } from 'vitest'
 import type { ScenarioSheet } from '@/lib/calc/scenario/scenario-types'
 import { formToScenario, scenarioToForm } from '@/lib/schemas/scenario-form'
-import { sampleSheet } from './support/samples'
+import { sampleSheet } from '@/tests/support/samples'
 
 const sheet = sampleSheet()
 const form = (change: Record<string, string> = {}, from: ScenarioSheet = sheet) => ({ ...scenarioToForm('Climb timing', from, 'metric'), ...change })

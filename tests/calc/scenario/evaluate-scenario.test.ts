@@ -7,7 +7,7 @@ import { evaluateScenario, inputErrors } from '@/lib/calc/scenario/evaluate-scen
 import { displacementCc } from '@/lib/calc/scenario/power-parts'
 import type { Engine, Scenario, ScenarioSheet } from '@/lib/calc/scenario/scenario-types'
 import { storedResult } from '@/lib/calc/scenario/stored-result'
-import { sampleEngine, sampleSheet } from '@/tests/schemas/support/samples'
+import { sampleEngine, sampleSheet } from '@/tests/support/samples'
 import { deepFreeze } from '@/tests/support/deep-freeze'
 import { expectClose } from '@/tests/support/expect-close'
 
