@@ -40,8 +40,8 @@ export default async function FrontPage() {
             <h2 id="front-keep">Keep</h2>
             <p>Every save is a revision that can be opened and compared. Two people saving at once lose nothing. A released plan is never changed, and the whole shop reads it.</p>
             <ul className="rows mt-4" aria-label="An example of revisions">
-              <li className="py-1.5">revision 7, the one being worked on</li>
-              <li className="py-1.5">revision 5, released as a plan</li>
+              <li className="py-1.5">the newest revision, being worked on</li>
+              <li className="py-1.5">an older one, released as a plan</li>
             </ul>
           </section>
         </div>

@@ -1,6 +1,6 @@
 'use client'
 
-import { useActionState, useCallback, useEffect, useMemo, useState, type ReactNode } from 'react'
+import { useActionState, useCallback, useMemo, useState, type ReactNode } from 'react'
 import { EngineConflict, isEngineDto } from './engine-conflict'
 import { EngineFactsPanel } from './engine-facts-panel'
 import { EngineField } from './engine-field'
@@ -8,6 +8,7 @@ import { PageHead } from '@/components/shell/page-head'
 import { Button } from '@/components/ui/button'
 import { ErrorSummary } from '@/components/ui/error-summary'
 import { SectionHead } from '@/components/ui/section'
+import { useAskBeforeLeaving } from '@/components/ui/use-ask-before-leaving'
 import type { Engine } from '@/lib/calc/live'
 import { longLabel } from '@/lib/compare/long-label'
 import { capFromOrder } from '@/lib/engine/cap-leads'
@@ -61,12 +62,7 @@ export function EngineForm({ over, title, saveLabel, initial, base, version, sys
   const leave = useCallback((name: string) => setLeft((now) => (now.has(name) ? now : new Set(now).add(name))), [])
   const dirty = Object.entries(values).some(([name, value]) => name in from.values && (from.values[name] ?? '') !== value)
 
-  useEffect(() => {
-    if (!dirty) return
-    const ask = (event: BeforeUnloadEvent) => event.preventDefault()
-    window.addEventListener('beforeunload', ask)
-    return () => window.removeEventListener('beforeunload', ask)
-  }, [dirty])
+  useAskBeforeLeaving(dirty)
 
   const errorOf = (name: string): string | undefined => {
     const sent = failed?.fieldErrors?.[name]

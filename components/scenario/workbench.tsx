@@ -1,8 +1,9 @@
 'use client'
 
 import { useRouter } from 'next/navigation'
-import { startTransition, useActionState, useDeferredValue, useEffect, useMemo, useState, type FormEvent, type ReactNode } from 'react'
+import { startTransition, useActionState, useDeferredValue, useMemo, useState, type FormEvent, type ReactNode } from 'react'
 import { PhoneRibbon } from '@/components/shell/phone-ribbon'
+import { useAskBeforeLeaving } from '@/components/ui/use-ask-before-leaving'
 import type { Engine, Limits, ScenarioResult, ScenarioSheet } from '@/lib/calc/live'
 import type { FormValues } from '@/lib/schemas/field'
 import type { RevisionDto } from '@/lib/schemas/revision-dto'
@@ -74,12 +75,7 @@ export function Workbench(props: WorkbenchProps) {
   const reopened = props.saved.number === saved.number ? props.saved.values : saved.values
   const dirty = Object.entries(live.values).some(([name, value]) => (saved.values[name] ?? '') !== value && (reopened[name] ?? '') !== value)
 
-  useEffect(() => {
-    if (!dirty) return
-    const ask = (event: BeforeUnloadEvent) => event.preventDefault()
-    window.addEventListener('beforeunload', ask)
-    return () => window.removeEventListener('beforeunload', ask)
-  }, [dirty])
+  useAskBeforeLeaving(dirty)
 
   const fill = (revision: RevisionDto) => {
     const values = scenarioToForm(revision.title, revision.sheet, system)
