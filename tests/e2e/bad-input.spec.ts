@@ -70,7 +70,7 @@ test('units can be typed and each person sees their own system', async ({ browse
   await page.context().close()
 })
 
-test('no connection, a session that ended and an engine that went: nothing typed is lost', async ({ browser }) => {
+test('no connection, and a session that ended: nothing typed is lost', async ({ browser }) => {
   const page = await pageOf(browser, 'designer')
   await newScenario(page, 'Interrupted')
   await field(page, 'backup.fixed.deg').fill('15.5')
