@@ -38,6 +38,9 @@ export { runUpDrop, torqueRatioFromDrop, type RunUpDrop, type RunUpDropInput, ty
 export { rotorRegister, type RotorRegister, type RotorRegisterInput } from './rotor/rotor-register'
 export { bestPhasingDeg } from './rotor/best-phasing'
 
+export type { CycleEngine, Cylinder } from './geometry/cycle-engine'
+export { cylinderVolumeCc, pistonTravelMm, type CylinderVolumeInput, type PistonTravelInput } from './geometry/cylinder-volume'
+
 export { defaultLimits, judge, type Limit, type LimitId, type Limits, type LimitUnit, type Verdict } from './limits'
 export { evaluateScenario, inputErrors } from './scenario/evaluate-scenario'
 export { partsStandingOn } from './scenario/dependencies'

@@ -1,8 +1,9 @@
 import type * as calc from '@/lib/calc'
 import { fixed, formula, mapSchedule, mechanicalSchedule, retard, table } from './advance/channels'
+import { geometryCalls } from './geometry/valid-calls'
 
 type Functions = { [Name in keyof typeof calc as (typeof calc)[Name] extends (...args: never[]) => unknown ? Name : never]: (typeof calc)[Name] }
-type Calls = { [Name in keyof Functions]?: readonly Parameters<Functions[Name]>[] }
+export type Calls = { [Name in keyof Functions]?: readonly Parameters<Functions[Name]>[] }
 
 const full = { crankRetard: retard, latencyUs: 40 }
 const powerCurve = [{ rpm: 1000, kw: 30 }, { rpm: 2000, kw: 62 }, { rpm: 3000, kw: 84 }]
@@ -52,4 +53,5 @@ export const validCalls: Calls = {
   torqueRatioFromDrop: [[{ rpm: 1800, dropRpm: 50, torqueExponent: -0.5 }]],
   rotorRegister: [[{ cylinders: 6, terminalWidthDeg: 8, rotorWidthDeg: 20, phasedAtDeg: 20, advancesDeg: [25, 15] }]],
   bestPhasingDeg: [[[25, 15]]],
+  ...geometryCalls,
 }
