@@ -1,0 +1,39 @@
+import { defineTopic } from '../topic'
+
+export const statistics = defineTopic({
+  id: 'statistics',
+  title: 'Trend, capability and control',
+  intro: 'How timing creeps with engine hours, and how evenly the shop makes its units.',
+  functions: ['linearTrend', 'processCapability', 'individualsChart'],
+  equations: [
+    {
+      id: 'trend', title: 'Trend and its band', tex: String.raw`\hat{y}(h) = b_0 + b_1 h \;\pm\; t_\nu\, s \sqrt{1 + \frac{1}{N} + \frac{(h - \bar{h})^2}{\sum (h_i - \bar{h})^2}}`,
+      note: 'Hours to the limit are counted from the last check, and given only where the slope is larger than its own uncertainty.',
+      symbols: [
+        { tex: 'h, y', meaning: 'engine hours, value', unit: 'h, °', range: 'three points, two distinct hours' },
+        { tex: 'b_0, b_1', meaning: 'intercept and slope, least squares', unit: '°, °/h' },
+        { tex: 's', meaning: 'residual standard deviation', unit: '°' },
+        { tex: String.raw`t_\nu`, meaning: 'Student t, N − 2 degrees of freedom', unit: 'no unit' },
+      ],
+      sources: ['nist-norris'],
+    },
+    {
+      id: 'capability', title: 'Process capability', tex: String.raw`C_p = \frac{U - L}{6 s}, \qquad C_{pk} = \frac{\min\left(U - \bar{x},\, \bar{x} - L\right)}{3 s}, \qquad C_{pm} = \frac{U - L}{6\sqrt{s^2 + (\bar{x} - T)^2}}`,
+      symbols: [
+        { tex: 'U, L', meaning: 'upper and lower limit', unit: 'that of the values', range: 'upper above lower' },
+        { tex: String.raw`\bar{x}, s`, meaning: 'mean and sample standard deviation', unit: 'that of the values', range: 's not 0' },
+        { tex: 'T', meaning: 'target, the middle unless given', unit: 'that of the values' },
+      ],
+      sources: ['nist-handbook'],
+    },
+    {
+      id: 'individuals-chart', title: 'Control chart of single values', tex: String.raw`\bar{x} \pm 3\,\frac{\overline{MR}}{1.128}, \qquad MR_\mathrm{upper} = 3.267\,\overline{MR}`,
+      symbols: [{ tex: String.raw`\overline{MR}`, meaning: 'mean of the steps between neighbours', unit: 'that of the values', range: 'two values at least' }],
+      sources: ['nist-handbook'],
+    },
+  ],
+  weaknesses: [
+    'A straight line is the simplest creep there is. A part that lets go at once gives no warning in any trend.',
+    'Capability figures from a few dozen units are loose: a Cpk of 1.0 from 25 units may as well be 0.7 or 1.3.',
+  ],
+})

@@ -1,0 +1,37 @@
+import { defineTopic } from '../topic'
+
+export const uncertainty = defineTopic({
+  id: 'uncertainty',
+  title: 'Stack of tolerances',
+  intro: 'Many small tolerances add up: as a likely spread, and at worst. Both are shown, because a spread hides the rare unit in which all of them lean one way.',
+  functions: ['combineUncertainty'],
+  equations: [
+    {
+      id: 'combined-uncertainty', title: 'Combined uncertainty', tex: String.raw`u = \sqrt{\sum_i c_i^2 u_i^2}, \qquad u_i = \sigma,\; \frac{a}{\sqrt{3}},\; \frac{a}{\sqrt{6}}, \qquad U = k\, u`,
+      note: 'Standard deviation of a normal, half width of a rectangular and of a triangular contribution.',
+      symbols: [
+        { tex: 'u', meaning: 'combined standard uncertainty', unit: 'that of the result' },
+        { tex: 'c_i', meaning: 'sensitivity, 1 unless set', unit: 'result over contribution' },
+        { tex: 'a', meaning: 'half width', unit: 'that of the contribution', range: '0 and up' },
+        { tex: 'k', meaning: 'coverage factor: Student t for 95 %, normal when nothing limits the freedom', unit: 'no unit' },
+      ],
+      sources: ['gum-2008'],
+    },
+    {
+      id: 'welch-satterthwaite', title: 'Effective degrees of freedom', tex: String.raw`\nu = \frac{u^4}{\sum_i \left(c_i u_i\right)^4 / \nu_i}`,
+      note: 'Kept as the number it is; some tables cut it down to a whole one.',
+      symbols: [{ tex: String.raw`\nu_i`, meaning: 'degrees of freedom of a contribution', unit: 'no unit', range: 'more than 0, or none given' }],
+      sources: ['gum-2008'],
+    },
+    {
+      id: 'worst-case', title: 'Worst case', tex: String.raw`w = \sum_i |c_i|\, a_i`,
+      note: 'A normal contribution counts at three standard deviations.',
+      symbols: [{ tex: 'w', meaning: 'all contributions at their ends, the same way', unit: 'that of the result' }],
+      sources: [], basis: 'arithmetic',
+    },
+  ],
+  weaknesses: [
+    'Contributions are taken as independent. Two that share a cause, such as one mark used for both channels, add straight and not by squares.',
+    'Linear only: a sensitivity that changes across the tolerance is not followed.',
+  ],
+})
