@@ -26,7 +26,7 @@ export default defineConfig([
   },
   wall(['lib/calc/**'], ['@/*', 'react*', 'next*', 'zod', 'swr', ...orm, '**/units/*', '**/schemas/*', '**/data/*'], 'lib/calc imports only itself and mathjs.'),
   wall(['lib/units/**'], ['@/*', 'react*', 'next*', 'zod', ...orm], 'lib/units imports only itself and mathjs.'),
-  wall(['lib/schemas/**', 'lib/words/**', 'lib/workbench/**', 'lib/compare/**', 'lib/engine/**'], ['@/lib/data/*', '@/lib/auth/*', '@/app/*', '@/components/*', 'react*', 'next*', ...orm], 'These stand on calc, units and each other only.'),
+  wall(['lib/schemas/**', 'lib/words/**', 'lib/workbench/**', 'lib/compare/**', 'lib/engine/**', 'lib/method/**'], ['@/lib/data/*', '@/lib/auth/*', '@/app/*', '@/components/*', 'react*', 'next*', ...orm], 'These stand on calc, units and each other only.'),
   wall(['lib/data/**', 'lib/auth/**'], ['@/app/*', '@/components/*'], 'data and auth never import pages or components.'),
   wall(['app/**'], [...orm, '@/lib/auth/lucia', '@/lib/data/support/*'], 'Pages, actions and routes go through lib/data and lib/auth/session.'),
   wall(['components/**'], ['@/lib/data/*', '@/lib/auth/session', '@/lib/auth/lucia', '@/lib/auth/passwords', '@/app/*', ...orm], 'Components get plain values; they never import data, entities or pages.'),

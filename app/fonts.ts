@@ -27,5 +27,8 @@ const serifGreek = localFont({
 
 const math = localFont({ src: '../public/fonts/noto-sans-math-subset.woff2', variable: '--font-math', weight: '400', display: 'swap', preload: false, adjustFontFallback: false })
 
+/** Formulas: its table of measures is what the browser sets fractions, roots and brackets by. */
+const formula = localFont({ src: '../public/fonts/stix-two-math-subset.woff2', variable: '--font-formula', weight: '400', display: 'swap', preload: false, adjustFontFallback: false })
+
 /** Class names for the root element: each defines one --font-… property. */
-export const fontVariables = [sansLatin, sansItalic, sansLatinExt, sansGreek, serifLatin, serifItalic, serifLatinExt, serifGreek, math].map((font) => font.variable).join(' ')
+export const fontVariables = [sansLatin, sansItalic, sansLatinExt, sansGreek, serifLatin, serifItalic, serifLatinExt, serifGreek, math, formula].map((font) => font.variable).join(' ')

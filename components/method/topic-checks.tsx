@@ -1,0 +1,36 @@
+'use client'
+
+import { useEffect } from 'react'
+import { Section } from '@/components/ui/section'
+import { provenanceWords, type TopicCase } from '@/lib/method/topic-case'
+import { CheckInputs } from './check-inputs'
+import { CheckRow } from './check-row'
+import { useCheckCounts, useCheckRun } from './check-run-context'
+
+const keyOf = (topic: string, id: string, index: number) => `${topic}/${id}/${index}`
+
+/** Published figures of one topic: what the source says, and what this browser computes. */
+export function TopicChecks({ topic, cases }: { topic: string, cases: readonly TopicCase[] }) {
+  const run = useCheckRun()
+  const counts = useCheckCounts(topic)
+  useEffect(() => run.add(topic, cases.flatMap(({ id, checks }) => checks.map((check, i) => ({ key: keyOf(topic, id, i), check })))), [run, topic, cases])
+  const total = cases.reduce((sum, { checks }) => sum + checks.length, 0)
+  if (total === 0) return <Section title="Published checks" level={3}><p className="fine">None: no published figure for these functions has been found yet.</p></Section>
+  const done = counts?.computed === total
+  const right = done ? (counts.outside > 0 ? `${counts.outside} of ${total} outside` : `${total} within`) : `${total} to compute`
+  return (
+    <Section title="Published checks" right={right} level={3} className="checks">
+      <div className="chk hd" aria-hidden="true"><span>Verdict</span><span>Figure</span><span className="r">Expected</span><span className="r">Computed</span><span className="r">Difference</span><span className="r">Tolerance</span></div>
+      {cases.map(({ id, title, provenance, source, note, checks }) => (
+        <div className="case" key={id}>
+          <p className="casehead"><b>{title}</b> <span className="fine">{source}</span> <span className={`tag ${provenance.replace(' ', '-')}`}>{provenanceWords[provenance]}</span></p>
+          {note ? <p className="fine">{note}</p> : null}
+          <ul className="rows" aria-label={title}>
+            {checks.map((check, i) => <CheckRow key={i} check={check} outcome={run.outcomeOf(keyOf(topic, id, i))} />)}
+          </ul>
+          <CheckInputs title={title} checks={checks} />
+        </div>
+      ))}
+    </Section>
+  )
+}

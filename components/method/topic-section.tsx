@@ -1,0 +1,21 @@
+import { Section } from '@/components/ui/section'
+import type { Topic } from '@/lib/method/topic'
+import type { TopicCase } from '@/lib/method/topic-case'
+import { EquationBlock } from './equation-block'
+import { TopicChecks } from './topic-checks'
+
+/** One topic: its equations, what is wrong with them, and the published figures they are held against. */
+export function TopicSection({ topic, cases }: { topic: Topic, cases: readonly TopicCase[] }) {
+  return (
+    <div id={topic.id} tabIndex={-1} className="mtopic">
+      <Section title={topic.title}>
+        <p className="prose">{topic.intro}</p>
+        {topic.equations.map((equation) => <EquationBlock key={equation.id} {...equation} />)}
+        <Section title="Where it is weak" level={3} className="weak">
+          <ul className="rows">{topic.weaknesses.map((weakness) => <li key={weakness}>{weakness}</li>)}</ul>
+        </Section>
+        <TopicChecks topic={topic.id} cases={cases} />
+      </Section>
+    </div>
+  )
+}
