@@ -1,6 +1,11 @@
 import type * as calc from '@/lib/calc'
 import { fixed, formula, mapSchedule, mechanicalSchedule, retard, table } from './advance/channels'
+import { airCalls } from './air/valid-calls'
+import { climbCalls } from './climb/valid-calls'
+import { coilCalls } from './coil/valid-calls'
 import { geometryCalls } from './geometry/valid-calls'
+import { redundancyCalls } from './redundancy/valid-calls'
+import { sparkCalls } from './spark/valid-calls'
 
 type Functions = { [Name in keyof typeof calc as (typeof calc)[Name] extends (...args: never[]) => unknown ? Name : never]: (typeof calc)[Name] }
 export type Calls = { [Name in keyof Functions]?: readonly Parameters<Functions[Name]>[] }
@@ -54,4 +59,9 @@ export const validCalls: Calls = {
   rotorRegister: [[{ cylinders: 6, terminalWidthDeg: 8, rotorWidthDeg: 20, phasedAtDeg: 20, advancesDeg: [25, 15] }]],
   bestPhasingDeg: [[[25, 15]]],
   ...geometryCalls,
+  ...redundancyCalls,
+  ...airCalls,
+  ...climbCalls,
+  ...coilCalls,
+  ...sparkCalls,
 }

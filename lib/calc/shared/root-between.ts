@@ -1,0 +1,31 @@
+/**
+ * Root of a function that has opposite signs at the two ends (or is 0 at one of them), to `tolerance` in its argument:
+ * false position (Illinois) with a bisection every third time, so that no shape makes it slow.
+ */
+export const rootBetween = (f: (x: number) => number, from: number, to: number, tolerance: number): number => {
+  let [a, b] = [from, to]
+  let [atA, atB] = [f(a), f(b)]
+  if (atA === 0) return a
+  let lastMoved: 'a' | 'b' | null = null
+  for (let i = 1; atB !== 0 && Math.abs(b - a) > tolerance; i += 1) {
+    const middle = a + (b - a) / 2
+    if (middle === a || middle === b) break
+    const chord = b - (atB * (b - a)) / (atB - atA)
+    const x = i % 3 !== 0 && (chord - a) * (chord - b) < 0 ? chord : middle
+    const value = f(x)
+    if (value === 0) return x
+    if (value < 0 === atA < 0) {
+      // The end that stays twice running gives way: its weight is halved, or the chord would creep up on the root from one side.
+      if (lastMoved === 'a') atB /= 2
+      lastMoved = 'a'
+      a = x
+      atA = value
+    } else {
+      if (lastMoved === 'b') atA /= 2
+      lastMoved = 'b'
+      b = x
+      atB = value
+    }
+  }
+  return atB === 0 ? b : Math.abs(atA) < Math.abs(atB) ? a : b
+}
