@@ -17,6 +17,9 @@ const covered = [
   'timingTorqueRatio', 'curvatureFromPoint', 'fitTimingParabola', 'brakeRatioFromIndicated',
   'deadCylinderPower', 'morseTest', 'frictionMepKpa', 'mepFromPower', 'powerFromMep',
   'fixedPitchOperatingPoint', 'constantSpeedOperatingPoint', 'runUpDrop', 'torqueRatioFromDrop', 'rotorRegister', 'bestPhasingDeg',
+  'standardAtmosphere', 'densityAltitudeM', 'powerAtDensityRatio', 'powerRequiredKw', 'climbRateMps', 'bestClimb', 'outcome',
+  'coilCurrentA', 'stalledCurrentA', 'dwellForCurrentMs', 'sparkEnergyMj', 'sparksPerSecond', 'dwellAvailableMs', 'sparkPeriodShare', 'coilHeat',
+  'breakdownKv', 'sparkDemandKv', 'sparkMargin', 'pistonTravelMm', 'cylinderVolumeCc',
 ]
 
 it('no function goes without a check', () => {
