@@ -50,6 +50,14 @@ const list: readonly Source[] = [
   { id: 'birnbaum-1969', author: 'Z. W. Birnbaum', title: 'On the importance of different components in a multicomponent system', year: 1969, provenance: 'memory', use: 'Importance of an event; the worths of risk are common practice beside it' },
   { id: 'iec-61508-6', author: 'International Electrotechnical Commission', title: 'IEC 61508-6, functional safety, guidelines', year: 2010, provenance: 'memory', use: 'Mean probability of faults that share a test interval; the beta factor' },
   { id: 'mil-hdbk-217f', author: 'US Department of Defense', title: 'MIL-HDBK-217F, Reliability prediction of electronic equipment', year: 1991, provenance: 'memory', use: 'Form of the temperature factor of a failure rate' },
+  { id: 'woschni-1967', author: 'G. Woschni', title: 'A universally applicable equation for the instantaneous heat transfer coefficient in the internal combustion engine, SAE 670931', year: 1967, provenance: 'read', use: 'Heat transfer from the gas to the walls; its constants were read' },
+  { id: 'douaud-eyzat-1978', author: 'A. M. Douaud and P. Eyzat', title: 'Four-octane-number method for predicting the anti-knock behavior of fuels and engines, SAE 780080', year: 1978, provenance: 'memory', use: 'Delay to autoignition against octane number, pressure and temperature' },
+  { id: 'livengood-wu-1955', author: 'J. C. Livengood and P. C. Wu', title: 'Correlation of autoignition phenomena in internal combustion engines and rapid compression machines', year: 1955, provenance: 'memory', use: 'The integral of the reciprocal delay that reaches 1 at autoignition' },
+  { id: 'hires-1978', author: 'S. D. Hires, R. J. Tabaczynski and J. M. Novak', title: 'The prediction of ignition delay and combustion intervals for a homogeneous charge, spark ignition engine, SAE 780232', year: 1978, provenance: 'memory', use: 'How the angles of a burn grow with speed and thin charge' },
+  { id: 'gamma-fit', author: 'the trade', title: 'Ratio of specific heats of a burning charge against temperature, a fit', year: null, provenance: 'common practice', use: 'γ = 1.338 − 6·10⁻⁵·T + 10⁻⁸·T²' },
+  { id: 'ferguson-kirkpatrick', author: 'C. R. Ferguson and A. T. Kirkpatrick', title: 'Internal Combustion Engines: Applied Thermosciences', year: null, provenance: 'memory', use: 'Finite heat release in closed form' },
+  { id: 'plint-martyr', author: 'M. Plint and A. Martyr', title: 'Engine Testing: Theory and Practice', year: null, provenance: 'read', use: 'First major order of an even-firing engine' },
+  { id: 'gasoline-faq', author: 'B. Hamilton', title: 'Gasoline FAQ', year: null, provenance: 'read', use: 'Octane asked for against compression ratio: a band for sanity' },
   { id: 'trade', author: 'the trade', title: 'Common practice', year: null, provenance: 'common practice', use: 'Facts of the trade without a published source' },
 ]
 

@@ -3,6 +3,7 @@ import { fixed, formula, mapSchedule, mechanicalSchedule, retard, table } from '
 import { airCalls } from './air/valid-calls'
 import { climbCalls } from './climb/valid-calls'
 import { coilCalls } from './coil/valid-calls'
+import { cycleCalls } from './cycle/valid-calls'
 import { geometryCalls } from './geometry/valid-calls'
 import { redundancyCalls } from './redundancy/valid-calls'
 import { sparkCalls } from './spark/valid-calls'
@@ -16,6 +17,7 @@ const load = { rpm: 2780, kw: 80, densityRatio: 1 }
 
 /** Calls that compute, at least one a function: the walk spoils them one value at a time. */
 export const validCalls: Calls = {
+  ...cycleCalls,
   crankDegFromMs: [[1, 2000]],
   msFromCrankDeg: [[20, 2000]],
   distributorDegFromCrank: [[20]],
