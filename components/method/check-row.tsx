@@ -22,7 +22,7 @@ export const CheckRow = memo(function CheckRow({ check, outcome }: { check: Publ
       </span>
       <Figure name="expected">{expectedText(check)}</Figure>
       <Figure name="computed">{outcome?.ok ? computedText(check, outcome.computed) : null}</Figure>
-      <Figure name="difference">{outcome?.ok ? differenceText(outcome.difference) : null}</Figure>
+      <Figure name="difference">{outcome?.ok ? differenceText(check, outcome.difference) : null}</Figure>
       <Figure name="tolerance">{toleranceText(check)}</Figure>
     </li>
   )

@@ -1,5 +1,6 @@
 'use client'
 
+import { CaretGlyph } from '@/components/ui/glyphs'
 import { VerdictMark } from '@/components/ui/verdict-mark'
 import { useCheckCounts } from './check-run-context'
 
@@ -34,7 +35,7 @@ export function MethodContents({ lines }: { lines: readonly ContentsLine[] }) {
     <div className="mtoc">
       <nav className="beside" aria-label="Contents"><h2 className="fine">Contents</h2><Lines lines={lines} /></nav>
       <details className="fold above">
-        <summary><span /><h2>Contents</h2><span className="sum">{lines.length} topics</span></summary>
+        <summary><CaretGlyph /><h2>Contents</h2><span className="sum">{lines.length} topics</span></summary>
         <nav aria-label="Contents"><Lines lines={lines} /></nav>
       </details>
     </div>

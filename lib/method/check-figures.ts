@@ -5,25 +5,24 @@ import { allowedDifference } from './judge-check'
 const superscript: Record<string, string> = { '-': '⁻', 0: '⁰', 1: '¹', 2: '²', 3: '³', 4: '⁴', 5: '⁵', 6: '⁶', 7: '⁷', 8: '⁸', 9: '⁹' }
 /** More digits than a double carries say nothing. */
 const mostDigits = 15
+/** A small figure of more decimals is easier read as a power of ten. */
+const plainDecimals = 5
 
 const magnitude = (value: number) => Math.floor(Math.log10(Math.abs(value)))
 
 /** 3.50 × 10⁻⁵ */
 function scientific(value: number, digits: number, sign: boolean): string {
   const [mantissa = '0', exponent = '0'] = value.toExponential(Math.min(Math.max(digits, 0), mostDigits)).split('e')
-  const power = [...String(Number(exponent))].map((sign) => superscript[sign] ?? sign).join('')
+  const power = [...String(Number(exponent))].map((digit) => superscript[digit] ?? digit).join('')
   return `${formatNumber(Number(mantissa), mantissa.split('.')[1]?.length ?? 0, sign)}\u00a0×\u00a010${power}`
 }
 
 function figure(value: number, decimals: number, sign = false): string {
   if (value === 0) return '0'
-  const digits = magnitude(value) + decimals
-  if (Math.abs(value) < 1e-3 || Math.abs(value) >= 1e7) return scientific(value, digits, sign)
+  const size = Math.abs(value)
+  if (size < 1e-3 && decimals > plainDecimals || size >= 1e7) return scientific(value, magnitude(value) + decimals, sign)
   return formatNumber(value, Math.max(0, Math.min(decimals, mostDigits - 1 - magnitude(value))), sign)
 }
-
-/** To two significant digits, as a difference or a tolerance is read. */
-const twoDigits = (value: number, sign = false): string => (value === 0 ? '0' : figure(value, Math.max(0, 1 - magnitude(value)), sign))
 
 /** Decimals of the shortest text of a number. */
 function ownDecimals(value: number): number {
@@ -47,6 +46,14 @@ function computedDecimals(check: PublishedCheck): number {
 
 export const expectedText = (check: PublishedCheck): string => figure(check.expected, printedDecimals(check))
 export const computedText = (check: PublishedCheck, value: number): string => figure(value, computedDecimals(check))
-export const differenceText = (difference: number): string => twoDigits(difference, true)
-export const toleranceText = ({ tolerance }: Pick<PublishedCheck, 'tolerance'>): string =>
-  'abs' in tolerance ? `±${twoDigits(tolerance.abs)}` : `±${twoDigits(tolerance.rel)} of it`
+
+/** One digit finer than the computed figure; below that it is rounding, and shown as none. */
+export function differenceText(check: PublishedCheck, difference: number): string {
+  const decimals = computedDecimals(check) + 1
+  return Math.abs(difference) < 0.5 * 10 ** -decimals ? '0' : figure(difference, decimals, true)
+}
+
+export function toleranceText({ tolerance }: Pick<PublishedCheck, 'tolerance'>): string {
+  const [value, ending] = 'abs' in tolerance ? [tolerance.abs, ''] : [tolerance.rel, ' of it']
+  return `±${figure(value, ownDecimals(value))}${ending}`
+}

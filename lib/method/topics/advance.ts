@@ -47,6 +47,7 @@ export const advance = defineTopic({
         { tex: String.raw`n_\mathrm{p}`, meaning: 'lowest speed that proves it; there may be none', unit: 'rpm' },
         { tex: String.raw`n_\mathrm{i}, n_\mathrm{max}`, meaning: 'idle and full speed', unit: 'rpm', range: 'idle below full' },
         { tex: String.raw`\tau`, meaning: 'tolerance of the timing check', unit: '°', range: '0 and up' },
+        { tex: String.raw`\alpha`, meaning: 'advance', unit: '°' },
       ],
       sources: ['trade'],
     },

@@ -25,6 +25,8 @@ export const atmosphere = defineTopic({
         { tex: String.raw`h_\rho`, meaning: 'height at which standard air is as dense', unit: 'm', range: '−5000 to 11 000' },
         { tex: String.raw`h_\mathrm{p}`, meaning: 'pressure altitude', unit: 'm', range: '−1000 to 11 000' },
         { tex: 'T', meaning: 'air temperature', unit: 'K', range: 'more than 0' },
+        { tex: String.raw`\sigma(h)`, meaning: 'density ratio of the standard atmosphere', unit: 'no unit' },
+        { tex: 'p(h)', meaning: 'its pressure', unit: 'kPa' },
       ],
       sources: ['us-standard-atmosphere-1976'],
     },

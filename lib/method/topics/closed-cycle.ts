@@ -4,7 +4,7 @@ export const closedCycle = defineTopic({
   id: 'closed-cycle',
   title: 'Pressure in the cylinder',
   intro: 'One zone of gas from inlet-valve closing to exhaust-valve opening: compressed, burned along a fixed curve, cooled by the walls. It tells settings of one engine apart; it clears nothing for flight.',
-  functions: ['simulateCycle', 'chargePressureFromVolumetricEfficiency', 'combustionEfficiency', 'findMbt', 'scaleBurn', 'calibrateBurn', 'cylinderVolumeCc', 'pistonTravelMm'],
+  functions: ['simulateCycle', 'chargePressureFromVolumetricEfficiency', 'combustionEfficiency', 'findMbt', 'scaleBurn', 'calibrateBurn', 'cylinderVolumeCc', 'pistonTravelMm', 'burnedFraction', 'wallHeatTransfer'],
   equations: [
     {
       id: 'cylinder-volume', title: 'Volume against crank angle', tex: String.raw`V(\theta) = \frac{V_\mathrm{d}}{\epsilon - 1} + \frac{\pi B^2}{4}\left(r + l - r\cos\theta - \sqrt{l^2 - r^2 \sin^2\theta}\right)`,
@@ -28,6 +28,8 @@ export const closedCycle = defineTopic({
         { tex: String.raw`\eta_\mathrm{v}`, meaning: 'volumetric efficiency', unit: 'no unit', range: 'more than 0' },
         { tex: String.raw`\rho_\mathrm{a}`, meaning: 'density of the air outside', unit: 'kg/m³', range: 'more than 0' },
         { tex: 'R', meaning: 'gas constant, 287', unit: 'J/(kg·K)' },
+        { tex: String.raw`m, m_\mathrm{f}`, meaning: 'mass of the charge; of the fuel in it', unit: 'kg' },
+        { tex: String.raw`V_\mathrm{d}`, meaning: 'displacement of one cylinder', unit: 'm³' },
       ],
       sources: [], basis: 'definition',
     },
@@ -40,11 +42,12 @@ export const closedCycle = defineTopic({
         { tex: String.raw`\theta_\mathrm{d}`, meaning: 'delay until burning shows', unit: '°', range: '0 and up' },
         { tex: String.raw`\Delta\theta`, meaning: 'duration of the burn', unit: '°', range: 'more than 0' },
         { tex: 'a, m', meaning: 'shape of the curve, 5 and 2 unless set', unit: 'no unit', range: 'more than 0; 0 and up' },
+        { tex: String.raw`\theta, \theta_0`, meaning: 'crank angle; where burning begins', unit: '°', range: 'inlet closing to exhaust opening' },
       ],
-      sources: ['heywood-1988', 'ferguson-kirkpatrick'],
+      sources: ['trade', 'ferguson-kirkpatrick'],
     },
     {
-      id: 'cycle-pressure', title: 'Pressure step by step', tex: String.raw`\frac{\mathrm{d}p}{\mathrm{d}\theta} = -\gamma\,\frac{p}{V}\frac{\mathrm{d}V}{\mathrm{d}\theta} + \frac{\gamma - 1}{V}\left(\eta_\mathrm{c}\, m_\mathrm{f} H\,\frac{\mathrm{d}x}{\mathrm{d}\theta} - \frac{\mathrm{d}Q_\mathrm{w}}{\mathrm{d}\theta}\right)`,
+      id: 'cycle-pressure', title: 'Pressure step by step', tex: String.raw`\frac{\mathrm{d}p}{\mathrm{d}\theta} = -\gamma\,\frac{p}{V}\,\frac{\mathrm{d}V}{\mathrm{d}\theta} + \frac{\gamma - 1}{V}\,\left(\eta_\mathrm{c}\, m_\mathrm{f} H\,\frac{\mathrm{d}x}{\mathrm{d}\theta} - \frac{\mathrm{d}Q_\mathrm{w}}{\mathrm{d}\theta}\right)`,
       note: 'Fourth-order Runge–Kutta in equal steps, cut at the start of the burn, at nine tenths of it and at its end, so that no step straddles a change of the equations.',
       symbols: [
         { tex: 'p', meaning: 'pressure', unit: 'kPa' },
@@ -52,16 +55,22 @@ export const closedCycle = defineTopic({
         { tex: String.raw`\eta_\mathrm{c}`, meaning: 'combustion efficiency', unit: 'no unit', range: 'above 0, to 1' },
         { tex: 'H', meaning: 'heating value of the fuel', unit: 'kJ/kg', range: '44 000 unless set' },
         { tex: String.raw`Q_\mathrm{w}`, meaning: 'heat to the walls', unit: 'J' },
+        { tex: String.raw`V, \theta`, meaning: 'volume; crank angle', unit: 'm³, °' },
+        { tex: String.raw`m_\mathrm{f}, x`, meaning: 'mass of fuel; share burned', unit: 'kg, no unit' },
       ],
       sources: ['ferguson-kirkpatrick'],
     },
     {
       id: 'gamma-temperature', title: 'Specific heats with temperature', tex: String.raw`\gamma = 1.338 - 6.0 \times 10^{-5}\, T + 1.0 \times 10^{-8}\, T^2, \qquad T = \frac{pV}{mR}`,
-      symbols: [{ tex: 'T', meaning: 'mean gas temperature', unit: 'K', range: 'fitted up to 3000, where it turns; beyond that a notice is given' }],
-      sources: ['ferguson-kirkpatrick'],
+      symbols: [
+        { tex: 'T', meaning: 'mean gas temperature', unit: 'K', range: 'fitted up to 3000, where it turns; beyond that a notice is given' },
+        { tex: String.raw`\gamma`, meaning: 'ratio of specific heats', unit: 'no unit' },
+        { tex: 'p, V, m, R', meaning: 'pressure, volume, mass, gas constant 287', unit: 'Pa, m³, kg, J/(kg·K)' },
+      ],
+      sources: ['gamma-fit'],
     },
     {
-      id: 'wall-heat', title: 'Heat to the walls', tex: String.raw`h = 3.26\, B^{-0.2} p^{0.8}\, T^{-0.55} w^{0.8}, \qquad w = 2.28\, \bar{S}_\mathrm{p} + c_2\,\frac{V_\mathrm{d} T_1}{p_1 V_1}\max\left(0,\, p - p_\mathrm{m}\right), \qquad \frac{\mathrm{d}Q_\mathrm{w}}{\mathrm{d}\theta} = \frac{h A\,(T - T_\mathrm{w})}{6\, n}`,
+      id: 'wall-heat', title: 'Heat to the walls', tex: String.raw`h = 3.26\, B^{-0.2} p^{0.8}\, T^{-0.55} w^{0.8}, \qquad w = 2.28\, \bar{S}_\mathrm{p} + c_2\,\frac{V_\mathrm{d} T_1}{p_1 V_1}\,\max\left(0,\, p - p_\mathrm{m}\right), \qquad \frac{\mathrm{d}Q_\mathrm{w}}{\mathrm{d}\theta} = \frac{h A\,(T - T_\mathrm{w})}{6\, n}`,
       symbols: [
         { tex: 'h', meaning: 'heat-transfer coefficient', unit: 'W/(m²·K)' },
         { tex: 'B', meaning: 'bore', unit: 'm' },
@@ -72,19 +81,28 @@ export const closedCycle = defineTopic({
         { tex: String.raw`p_\mathrm{m}`, meaning: 'pressure without burning, exponent 1.3', unit: 'kPa' },
         { tex: 'A', meaning: 'surface of head, piston and liner exposed', unit: 'm²' },
         { tex: String.raw`T_\mathrm{w}`, meaning: 'wall temperature', unit: 'K', range: 'more than 0' },
+        { tex: 'T', meaning: 'gas temperature', unit: 'K' },
+        { tex: String.raw`V_\mathrm{d}, V_1, T_1, p_1`, meaning: 'displacement; state at inlet-valve closing', unit: 'm³, K, kPa' },
+        { tex: String.raw`Q_\mathrm{w}, \theta, n`, meaning: 'heat to the walls; crank angle; speed', unit: 'J, °, rpm' },
       ],
       sources: ['woschni-1967'],
     },
     {
       id: 'combustion-efficiency', title: 'Fuel that can burn', tex: String.raw`\eta_\mathrm{c} = 0.97\,\min\left(1,\, \frac{\lambda}{14.6}\right)`,
       note: 'Offered, not imposed: rich mixture lacks the air for all of its fuel.',
-      symbols: [{ tex: String.raw`\lambda`, meaning: 'air to fuel by mass', unit: 'no unit', range: 'more than 0' }],
+      symbols: [
+        { tex: String.raw`\lambda`, meaning: 'air to fuel by mass', unit: 'no unit', range: 'more than 0' },
+        { tex: String.raw`\eta_\mathrm{c}`, meaning: 'share of the heat of the fuel that can be released', unit: 'no unit' },
+      ],
       sources: [], basis: 'choice of this program',
     },
     {
       id: 'mbt', title: 'Spark of best torque', tex: String.raw`\alpha_\mathrm{MBT} = \arg\max_{-20 \leq \alpha \leq 60} \int p\,\mathrm{d}V`,
       note: 'A scenario has one best-torque timing, with where it came from. Delay and duration of the burn are scaled together until the cycle agrees with it to 0.01°; where no burn of 30° to 140° does, the results of the cycle are withheld.',
-      symbols: [{ tex: String.raw`\alpha_\mathrm{MBT}`, meaning: 'advance of greatest work', unit: '°', range: '−20 to 60, to 0.01' }],
+      symbols: [
+        { tex: String.raw`\alpha_\mathrm{MBT}`, meaning: 'advance of greatest work', unit: '°', range: '−20 to 60, to 0.01' },
+        { tex: 'p, V', meaning: 'pressure and volume through the closed part', unit: 'Pa, m³' },
+      ],
       sources: [], basis: 'definition',
     },
     {

@@ -16,6 +16,7 @@ export const crankTorque = defineTopic({
         { tex: "x, x', x''", meaning: 'piston travel and its derivatives by crank angle', unit: 'm' },
         { tex: String.raw`m_\mathrm{r}`, meaning: 'mass that goes up and down, one cylinder', unit: 'kg', range: '0 and up' },
         { tex: String.raw`\omega`, meaning: 'crank speed', unit: 'rad/s' },
+        { tex: String.raw`\varphi, N`, meaning: 'crank angle; cylinders', unit: 'rad, no unit' },
       ],
       sources: ['plint-martyr'], basis: 'geometry',
     },
@@ -25,6 +26,8 @@ export const crankTorque = defineTopic({
       symbols: [
         { tex: 'a_k', meaning: 'amplitude of order k, k times a turn', unit: 'Nm', range: '0 and up' },
         { tex: String.raw`\varphi`, meaning: 'crank angle in whole degrees', unit: '°', range: '0 to 719' },
+        { tex: 'T', meaning: 'torque at the crank', unit: 'Nm' },
+        { tex: 'k', meaning: 'order', unit: 'no unit', range: '½ to 6' },
       ],
       sources: ['plint-martyr'],
     },

@@ -25,6 +25,8 @@ export const deadCylinders = defineTopic({
       symbols: [
         { tex: String.raw`P_{\mathrm{i},j}`, meaning: 'indicated power of cylinder j', unit: 'kW', range: '0 and up' },
         { tex: String.raw`P_{\mathrm{b},-j}`, meaning: 'brake power with that cylinder cut out, at the same speed', unit: 'kW' },
+        { tex: String.raw`P_\mathrm{b}`, meaning: 'brake power with all firing', unit: 'kW', range: 'more than 0' },
+        { tex: String.raw`\eta_\mathrm{m}`, meaning: 'mechanical efficiency', unit: 'no unit', range: '0 to 1' },
       ],
       sources: ['joel', 'nag', 'singh', 'gupta', 'rajput'],
     },

@@ -4,7 +4,7 @@ export const detonation = defineTopic({
   id: 'detonation',
   title: 'Detonation',
   intro: 'Unburned gas ahead of the flame lights itself if pressure and heat last long enough. The integral says how far that has come by the end of the burn; 1 or more means detonation is to be expected.',
-  functions: ['knockLimitedSpark', 'sparkMap'],
+  functions: ['knockLimitedSpark', 'sparkMap', 'autoignitionDelayMs'],
   equations: [
     {
       id: 'knock-delay', title: 'Time to self-ignition', tex: String.raw`\tau = 17.68 \left(\frac{O}{100}\right)^{3.402} p^{-1.7} \exp\left(\frac{3800}{T_\mathrm{u}}\right)`,
@@ -18,7 +18,11 @@ export const detonation = defineTopic({
     },
     {
       id: 'unburned-temperature', title: 'Unburned gas', tex: String.raw`T_\mathrm{u} = T_1 \left(\frac{p}{p_1}\right)^{(\gamma_\mathrm{u} - 1)/\gamma_\mathrm{u}}, \qquad \gamma_\mathrm{u} = 1.33`,
-      symbols: [{ tex: 'T_1, p_1', meaning: 'state at inlet-valve closing', unit: 'K, kPa', range: 'more than 0' }],
+      symbols: [
+        { tex: 'T_1, p_1', meaning: 'state at inlet-valve closing', unit: 'K, kPa', range: 'more than 0' },
+        { tex: String.raw`T_\mathrm{u}, p`, meaning: 'unburned gas; pressure', unit: 'K, kPa' },
+        { tex: String.raw`\gamma_\mathrm{u}`, meaning: 'ratio of specific heats of the unburned gas', unit: 'no unit' },
+      ],
       sources: [], basis: 'definition',
     },
     {
@@ -27,8 +31,10 @@ export const detonation = defineTopic({
         { tex: 'I', meaning: 'knock integral', unit: 'no unit', range: '1 and more: detonation expected' },
         { tex: String.raw`\theta_{90}`, meaning: 'angle at which nine tenths are burned, or exhaust opening', unit: '°' },
         { tex: String.raw`O_\mathrm{req}`, meaning: 'octane at which the integral is 1', unit: 'no unit' },
+        { tex: String.raw`t, \tau`, meaning: 'time; time to self-ignition', unit: 'ms' },
+        { tex: 'O', meaning: 'octane number of the fuel', unit: 'no unit' },
       ],
-      sources: ['livengood-wu-1955', 'douaud-eyzat-1978'],
+      sources: ['livengood-wu-1955', 'douaud-eyzat-1978', 'gasoline-faq'],
     },
     {
       id: 'knock-limit', title: 'Margin to detonation', tex: String.raw`\alpha_\mathrm{K} = \min\left\{\alpha \geq -20 : I(\alpha) \geq 1\right\}, \qquad \text{margin} = \alpha_\mathrm{K} - \alpha`,
@@ -36,6 +42,7 @@ export const detonation = defineTopic({
       symbols: [
         { tex: String.raw`\alpha_\mathrm{K}`, meaning: 'limit', unit: '°', range: '−20 to 60 to 0.01; or never, or always' },
         { tex: String.raw`\alpha`, meaning: 'advance planned', unit: '°' },
+        { tex: 'I', meaning: 'knock integral with the spark there', unit: 'no unit' },
       ],
       sources: ['douaud-eyzat-1978'],
     },

@@ -14,7 +14,7 @@ export const sparkDemand = defineTopic({
         { tex: String.raw`\delta`, meaning: 'density of the gas over that at 20 °C and one atmosphere', unit: 'no unit', range: 'more than 0' },
         { tex: 'p, T', meaning: 'pressure and temperature in the gap', unit: 'kPa, K', range: 'more than 0' },
       ],
-      sources: ['wadhwa'],
+      sources: ['wadhwa', 'plug-gap-band'],
     },
     {
       id: 'spark-pressure', title: 'Cylinder at the spark', tex: String.raw`p = p_1 \left(\frac{V_1}{V(\alpha)}\right)^{n}, \qquad T = T_1 \left(\frac{V_1}{V(\alpha)}\right)^{n - 1}`,

@@ -22,6 +22,7 @@ export const timingPower = defineTopic({
       symbols: [
         { tex: String.raw`T/T_\mathrm{MBT}`, meaning: 'torque kept at that advance', unit: 'no unit', range: '0 to 1' },
         { tex: String.raw`\alpha - \alpha_\mathrm{MBT}`, meaning: 'distance from best torque', unit: '°', range: 'not 0' },
+        { tex: 'c', meaning: 'curvature', unit: 'per °²' },
       ],
       sources: [], basis: 'arithmetic',
     },
