@@ -20,6 +20,7 @@ const covered = [
   'standardAtmosphere', 'densityAltitudeM', 'powerAtDensityRatio', 'powerRequiredKw', 'climbRateMps', 'bestClimb', 'outcome',
   'coilCurrentA', 'stalledCurrentA', 'dwellForCurrentMs', 'sparkEnergyMj', 'sparksPerSecond', 'dwellAvailableMs', 'sparkPeriodShare', 'coilHeat',
   'breakdownKv', 'sparkDemandKv', 'sparkMargin', 'pistonTravelMm', 'cylinderVolumeCc',
+  'eventProbability', 'faultTreeProbability', 'timeAveragedProbability', 'minimalCutSets', 'importance', 'singlePoints', 'rateSensitivity',
 ]
 
 it('no function goes without a check', () => {

@@ -15,8 +15,8 @@ export interface Diagram {
   readonly levelOf: Int32Array
 }
 
-/** Sizes to try each order with, so that a bad order costs little where another is good. */
-const nodeBounds = [5_000, 50_000, 500_000, 3_000_000]
+/** Sizes to try the orders with, and how many of them, so that a bad order costs little where another is good and a hopeless tree does not cost much. */
+const attempts = [{ maxNodes: 5_000, orders: 4 }, { maxNodes: 50_000, orders: 4 }, { maxNodes: 1_500_000, orders: 2 }]
 const stepsPerNode = 20
 
 const build = (tree: ReadyTree, order: readonly number[], maxNodes: number): Diagram => {
@@ -95,19 +95,28 @@ const reachable = (table: NodeTable, root: number, order: readonly number[], lev
   return { leaf, low, high, levelOf }
 }
 
+const isSame = (one: readonly number[], other: readonly number[]): boolean => one.every((leaf, i) => leaf === other[i])
+
 /** The diagram of a tree, by the first order that keeps it small. */
 export const diagramOf = (tree: ReadyTree): Diagram => {
-  const orders = variableOrders(tree)
-  for (const maxNodes of nodeBounds) {
-    for (const order of orders) {
+  const waiting = variableOrders(tree)
+  const tried: number[][] = []
+  for (const { maxNodes, orders } of attempts) {
+    for (let i = 0; i < orders; i += 1) {
+      while (tried.length <= i && waiting.length > 0) {
+        const next = waiting.shift()?.() ?? []
+        if (!tried.some((other) => isSame(next, other))) tried.push(next)
+      }
+      const order = tried[i]
+      if (!order) break
       try {
-        return build(tree, order(), maxNodes)
+        return build(tree, order, maxNodes)
       } catch (error) {
         if (!(error instanceof OutOfBounds)) throw error
       }
     }
   }
-  const most = nodeBounds.at(-1) ?? 0
+  const most = attempts.at(-1)?.maxNodes ?? 0
   throw tooLarge(tree.given, `a decision diagram of at most ${most} nodes`,
     `This fault tree is too entangled to be computed exactly: its decision diagram grows past ${most} nodes. Split it, or share fewer events between its branches.`)
 }

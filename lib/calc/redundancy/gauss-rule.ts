@@ -64,5 +64,7 @@ export const intervalRule = (count: number, load: number): Rule => {
     const other = gauss(smooth)
     for (let i = halvings; i > 0; i -= 1) add(other, 2 ** -i, 2 ** -i)
   }
-  return { at, weight }
+  // Rounding would else take a sure failure off 1.
+  const sum = weight.reduce((total, share) => total + share, 0)
+  return { at, weight: weight.map((share) => share / sum) }
 }

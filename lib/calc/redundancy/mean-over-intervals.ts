@@ -22,6 +22,7 @@ export interface Plan {
 
 /** Steps through nodes that one call may take. */
 const maxWork = 1e9
+const stepsPerLeaf = 20
 
 const groupOf = ({ leaf, low, high }: Diagram, leaves: readonly number[]): Group => {
   const own = new Set(leaves)
@@ -75,9 +76,9 @@ export const meanOverIntervals = (plan: Plan, growth: (leaf: number) => number =
   const amounts = Float64Array.from(tree.leaves, ({ load }, i) => (load.kind === 'probability' ? load.amount : load.amount * growth(i)))
   const probabilities = Float64Array.from(tree.leaves, ({ load: { kind } }, i) => meanProbability({ kind, amount: amounts[i] ?? 0 }))
   const rules = groups.map(({ leaves }) => intervalRule(leaves.length, leaves.reduce((sum, i) => sum + (amounts[i] ?? 0), 0)))
-  if (workOf(plan, rules) * times > maxWork) {
+  if ((workOf(plan, rules) + stepsPerLeaf * tree.leaves.length) * times > maxWork) {
     throw tooLarge(tree.given, `at most ${maxWork} steps`,
-      'Too many latent faults with check intervals of their own come together in this fault tree: give parts that are checked together the same interval, or split the tree.')
+      'This fault tree takes too many steps to be averaged over its check intervals: give parts that are checked together the same interval, or split the tree.')
   }
   const values = new Float64Array(leaf.length)
   values[1] = 1
