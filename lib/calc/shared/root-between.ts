@@ -6,15 +6,18 @@ export const rootBetween = (f: (x: number) => number, from: number, to: number, 
   let [a, b] = [from, to]
   let [atA, atB] = [f(a), f(b)]
   if (atA === 0) return a
+  if (atB === 0) return b
+  // Kept apart from the weights, which may be halved down to 0.
+  const isNegativeAtA = atA < 0
   let lastMoved: 'a' | 'b' | null = null
-  for (let i = 1; atB !== 0 && Math.abs(b - a) > tolerance; i += 1) {
+  for (let i = 1; Math.abs(b - a) > tolerance; i += 1) {
     const middle = a + (b - a) / 2
     if (middle === a || middle === b) break
     const chord = b - (atB * (b - a)) / (atB - atA)
     const x = i % 3 !== 0 && (chord - a) * (chord - b) < 0 ? chord : middle
     const value = f(x)
     if (value === 0) return x
-    if (value < 0 === atA < 0) {
+    if (value < 0 === isNegativeAtA) {
       // The end that stays twice running gives way: its weight is halved, or the chord would creep up on the root from one side.
       if (lastMoved === 'a') atB /= 2
       lastMoved = 'a'
@@ -27,5 +30,5 @@ export const rootBetween = (f: (x: number) => number, from: number, to: number, 
       atB = value
     }
   }
-  return atB === 0 ? b : Math.abs(atA) < Math.abs(atB) ? a : b
+  return b
 }
