@@ -87,6 +87,23 @@ export { autoignitionDelayMs, type AutoignitionInput } from './cycle/autoignitio
 export { wallHeatTransfer, type WallHeatInput } from './cycle/wall-heat-transfer'
 export { burnedFraction, type BurnedFractionInput } from './cycle/wiebe'
 
+export { normalQuantile } from './statistics/normal-quantile'
+export { studentTQuantile } from './statistics/student-t-quantile'
+export { combineUncertainty, type CombinedUncertainty, type CoverageInput, type Distribution, type UncertaintyContribution } from './statistics/combine-uncertainty'
+export { leastSquares, type LeastSquares, type LeastSquaresInput } from './statistics/least-squares'
+export { linearTrend, type LinearTrend, type LinearTrendInput, type TrendPoint, type TrendPrediction } from './statistics/linear-trend'
+export { processCapability, type CapabilityLimits, type ProcessCapability } from './statistics/process-capability'
+export { cpkInterval, type CpkInterval, type CpkIntervalInput } from './statistics/cpk-interval'
+export { individualsChart, type IndividualsChart } from './statistics/individuals-chart'
+
+export type { BenchPlan, BenchReading, ChannelName } from './bench/bench-types'
+export type { BenchRow, BenchScatter, BenchStagger } from './bench/bench-groups'
+export type { BenchCrankRetard } from './bench/retard-step'
+export { evaluateBenchRun, type BenchRun, type BenchRunInput } from './bench/evaluate-bench-run'
+export { benchReadingsToAdvance, type BenchWheel, type IndexDatum, type RelativeDatum } from './bench/bench-readings-to-advance'
+export { evaluateTimingCheck, type TimingCheck, type TimingCheckInput } from './checks/evaluate-timing-check'
+export { evaluateRunUp, type ExpectedDrops, type RunUp, type RunUpChannel, type RunUpInput } from './checks/evaluate-run-up'
+
 export { defaultLimits, judge, type Limit, type LimitId, type Limits, type LimitUnit, type Verdict } from './limits'
 export { evaluateScenario, inputErrors } from './scenario/evaluate-scenario'
 export { partsStandingOn } from './scenario/dependencies'

@@ -58,6 +58,16 @@ const list: readonly Source[] = [
   { id: 'ferguson-kirkpatrick', author: 'C. R. Ferguson and A. T. Kirkpatrick', title: 'Internal Combustion Engines: Applied Thermosciences', year: null, provenance: 'memory', use: 'Finite heat release in closed form' },
   { id: 'plint-martyr', author: 'M. Plint and A. Martyr', title: 'Engine Testing: Theory and Practice', year: null, provenance: 'read', use: 'First major order of an even-firing engine' },
   { id: 'gasoline-faq', author: 'B. Hamilton', title: 'Gasoline FAQ', year: null, provenance: 'read', use: 'Octane asked for against compression ratio: a band for sanity' },
+  { id: 'gum-2008', author: 'Joint Committee for Guides in Metrology', title: 'JCGM 100, Guide to the expression of uncertainty in measurement', year: 2008, provenance: 'read', use: 'Combination of uncertainties, effective degrees of freedom, Student’s t (table G.2); examples H.1 to H.3' },
+  { id: 'hill-1970', author: 'G. W. Hill', title: 'Algorithm 395: Student’s t-distribution, Communications of the ACM 13', year: 1970, provenance: 'memory', use: 'Expansion of Student’s t about the normal value for many degrees of freedom' },
+  { id: 'wichura-1988', author: 'M. J. Wichura', title: 'Algorithm AS 241: The percentage points of the normal distribution, Applied Statistics 37', year: 1988, provenance: 'memory', use: 'Normal quantiles' },
+  { id: 'bissell-1990', author: 'A. F. Bissell', title: 'How reliable is your capability index?, Applied Statistics 39', year: 1990, provenance: 'memory', use: 'Interval of a capability index' },
+  { id: 'capability-example', author: 'SAS Institute', title: 'QC user’s guide, example 5.3', year: null, provenance: 'read', use: 'Capability interval of 75 measured amplifications' },
+  { id: 'chart-constants', author: 'quality control handbooks', title: 'Factors of control charts', year: null, provenance: 'read', use: 'd2 and D4 for ranges of two values' },
+  { id: 'nist-handbook', author: 'National Institute of Standards and Technology', title: 'e-Handbook of Statistical Methods, 6.1.6 and 6.3.2.2', year: null, provenance: 'memory', use: 'Chart of ten flow rates; capability of a worked process' },
+  { id: 'nist-norris', author: 'National Institute of Standards and Technology', title: 'Statistical Reference Datasets, Norris', year: null, provenance: 'read', use: 'Certified values of a least-squares line' },
+  { id: 'nist-longley', author: 'National Institute of Standards and Technology', title: 'Statistical Reference Datasets, Longley', year: null, provenance: 'read', use: 'Certified values of least squares with seven columns that nearly depend on each other' },
+  { id: 'nist-misra1a', author: 'National Institute of Standards and Technology', title: 'Statistical Reference Datasets, Misra1a', year: null, provenance: 'read', use: 'Certified values of a curve of the form of a coil’s current' },
   { id: 'trade', author: 'the trade', title: 'Common practice', year: null, provenance: 'common practice', use: 'Facts of the trade without a published source' },
 ]
 

@@ -1,12 +1,15 @@
 import type * as calc from '@/lib/calc'
 import { fixed, formula, mapSchedule, mechanicalSchedule, retard, table } from './advance/channels'
 import { airCalls } from './air/valid-calls'
+import { benchCalls } from './bench/valid-calls'
+import { checkCalls } from './checks/valid-calls'
 import { climbCalls } from './climb/valid-calls'
 import { coilCalls } from './coil/valid-calls'
 import { cycleCalls } from './cycle/valid-calls'
 import { geometryCalls } from './geometry/valid-calls'
 import { redundancyCalls } from './redundancy/valid-calls'
 import { sparkCalls } from './spark/valid-calls'
+import { statisticsCalls } from './statistics/valid-calls'
 
 type Functions = { [Name in keyof typeof calc as (typeof calc)[Name] extends (...args: never[]) => unknown ? Name : never]: (typeof calc)[Name] }
 export type Calls = { [Name in keyof Functions]?: readonly Parameters<Functions[Name]>[] }
@@ -66,4 +69,7 @@ export const validCalls: Calls = {
   ...climbCalls,
   ...coilCalls,
   ...sparkCalls,
+  ...statisticsCalls,
+  ...benchCalls,
+  ...checkCalls,
 }
