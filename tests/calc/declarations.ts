@@ -41,7 +41,8 @@ for (const { name, file } of sourceFiles) {
   for (const statement of file.statements) {
     const isExported = ts.canHaveModifiers(statement) && ts.getModifiers(statement)?.some(({ kind }) => kind === ts.SyntaxKind.ExportKeyword)
     if (!isExported) continue
-    if (ts.isFunctionDeclaration(statement) && statement.name) {
+    // Of overloads the first carries the docstring.
+    if (ts.isFunctionDeclaration(statement) && statement.name && !declarations.has(statement.name.text)) {
       declarations.set(statement.name.text, { file: name, doc: docOf(statement), parameters: parametersOf(statement.parameters) })
     }
     if (ts.isVariableStatement(statement)) {

@@ -27,7 +27,9 @@ const expectSame = (actual: unknown, expected: unknown, tolerance: number, line:
   }
 }
 
-const evaluate = (code: string): unknown => new Function(...Object.keys(calc), `return (${code})`)(...Object.values(calc))
+/** In an async function, so that an example may wait. */
+const AsyncFunction = (async () => {}).constructor as FunctionConstructor
+const evaluate = (code: string): Promise<unknown> => new AsyncFunction(...Object.keys(calc), `return (${code})`)(...Object.values(calc)) as Promise<unknown>
 
 describe.each(someCases(names))('%s', (name) => {
   const { doc = [], parameters = [] } = declarations.get(name) ?? {}
@@ -56,12 +58,12 @@ describe.each(someCases(names))('%s', (name) => {
     if (id !== undefined) expect(calc.sources[id]?.provenance).toBe(provenance)
   })
 
-  it('gives examples that hold', () => {
+  it('gives examples that hold', async () => {
     const examples = doc.slice(doc.indexOf('@example') + 1).filter((line) => line !== '')
     for (const line of someCases(examples)) {
       const [, code, literal] = /^(.+?) \/\/ → (.+)$/.exec(line) ?? []
       expect(code, line).toBeDefined()
-      expectSame(evaluate(code ?? ''), evaluate(literal ?? ''), toleranceOf(literal ?? ''), line)
+      expectSame(await evaluate(code ?? ''), await evaluate(literal ?? ''), toleranceOf(literal ?? ''), line)
     }
   })
 })
