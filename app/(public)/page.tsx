@@ -45,7 +45,7 @@ export default async function FrontPage() {
             </ul>
           </section>
         </div>
-        <p className="fine pb-8">The figures on this page belong to an invented engine and are computed by the same library as the workbench.</p>
+        <p className="fine pb-8">The figures on this page belong to an invented engine and are computed by the same library as the workbench. <TextLink href="/method">Every equation, its source, and where it is weak</TextLink></p>
       </main>
       <PageFoot><ThemeSwitch theme={theme} setTheme={setTheme} /></PageFoot>
     </>

@@ -13,8 +13,8 @@ export interface DiffRow {
   key: string
   label: string
   channel: 'primary' | 'backup' | null
-  /** Under the label: the limit. */
-  under?: string | null
+  /** Under the label: the limit and the like. */
+  under?: ReactNode
   left: ReactNode
   right: ReactNode
   /** 'same', a signed number, or null where there is no number to give. */
@@ -26,6 +26,8 @@ export interface DiffRow {
 
 export interface DiffGroup {
   title: string | null
+  /** Stands after the title. */
+  after?: ReactNode
   rows: readonly DiffRow[]
 }
 
@@ -39,9 +41,9 @@ export function DiffTable({ caption, columns, groups }: { caption: string, colum
     <table className="led diff">
       <caption className="sr">{caption}</caption>
       <thead><tr><td /><Head {...columns[0]} /><Head {...columns[1]} /><th scope="col" className="r">difference</th></tr></thead>
-      {groups.map(({ title, rows }, i) => (
+      {groups.map(({ title, after, rows }, i) => (
         <tbody key={title ?? i}>
-          {title === null ? null : <tr className="gh"><th scope="rowgroup" colSpan={4}>{title}</th></tr>}
+          {title === null ? null : <tr className="gh"><th scope="rowgroup" colSpan={4}>{title}{after ? <> {after}</> : null}</th></tr>}
           {rows.map((row) => (
             <tr key={row.key} className={clsx(row.isBlock && 'tall') || undefined}>
               <th scope="row">{row.channel ? <><ChannelChip channel={letterOf(row.channel)} spoken /> </> : null}{row.label}{row.under ? <> <small>{row.under}</small></> : null}</th>

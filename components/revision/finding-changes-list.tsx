@@ -1,3 +1,4 @@
+import { EquationLink } from '@/components/method/equation-link'
 import { ChannelChip } from '@/components/ui/channel-chip'
 import { EmptyNote } from '@/components/ui/note'
 import { RuledList, RuledRow } from '@/components/ui/ruled-list'
@@ -5,6 +6,7 @@ import { Section } from '@/components/ui/section'
 import { VerdictMark } from '@/components/ui/verdict-mark'
 import type { Finding } from '@/lib/calc/live'
 import type { FindingChange, FindingChanges } from '@/lib/compare/finding-changes'
+import { findingEquation } from '@/lib/method/anchors'
 import type { UnitSystem } from '@/lib/units'
 import { findingTitle, findingValue, letterOf, limitWords, verdictWord } from '@/lib/words/findings'
 
@@ -22,7 +24,7 @@ function ChangeRow({ change: { was, now }, system }: { change: FindingChange, sy
   return (
     <RuledRow mark={<VerdictMark verdict={now?.verdict ?? 'notJudged'} wordless />} hit={now?.verdict === 'outside'}>
       <b>{findingTitle(shown, system)}</b>{shown.channel ? <> <ChannelChip channel={letterOf(shown.channel)} spoken /></> : null}
-      <small>{wordOf(was)} before{was ? ` (${valueWords(was, system)})` : ''}, {wordOf(now)} now{now ? ` (${valueWords(now, system)})` : ''}</small>
+      <small>{wordOf(was)} before{was ? ` (${valueWords(was, system)})` : ''}, {wordOf(now)} now{now ? ` (${valueWords(now, system)})` : ''} <EquationLink id={findingEquation[shown.limitId]} of={findingTitle(shown, system)} /></small>
     </RuledRow>
   )
 }

@@ -1,3 +1,4 @@
+import { EquationLink } from '@/components/method/equation-link'
 import { DiffTable, type DiffColumn } from './diff-table'
 import { Num } from '@/components/ui/num'
 import { VerdictMark } from '@/components/ui/verdict-mark'
@@ -28,14 +29,15 @@ function Side({ side, unit }: { side: ResultSide | null, unit: ResultRow['unit']
 
 /** Results of two evaluations side by side: what the limits judge first, then the figures people quote. */
 export function ResultDifferences({ left, right, columns, system }: ResultDifferencesProps) {
-  const groups = [{ id: 'findings', title: 'Judged by the limits', rows: findingRows(left, right, system) }, ...keyRows(left, right, system)]
+  const groups = [{ id: 'findings', title: 'Judged by the limits', equation: null, rows: findingRows(left, right, system) }, ...keyRows(left, right, system)]
   return (
     <DiffTable
       caption="Results, with the difference of the second from the first" columns={columns}
-      groups={groups.map(({ title, rows }) => ({
-        title,
+      groups={groups.map(({ title, equation, rows }) => ({
+        title, after: equation ? <EquationLink id={equation} of={title} /> : undefined,
         rows: rows.map((row) => ({
-          key: row.id, label: row.label, channel: row.channel, under: row.limit,
+          key: row.id, label: row.label, channel: row.channel,
+          under: row.equation ? <>{row.limit} <EquationLink id={row.equation} of={row.label} /></> : row.limit,
           left: <Side side={row.left} unit={row.unit} />, right: <Side side={row.right} unit={row.unit} />,
           // A figure that one side withholds has no difference; the word beside it says so.
           difference: row.difference ?? (row.left?.text === row.right?.text ? 'same' : null), isSame: row.difference === 'same',

@@ -1,12 +1,14 @@
 'use client'
 
 import { memo, useState } from 'react'
+import { EquationLink } from '@/components/method/equation-link'
 import { LinkButton } from '@/components/ui/button'
 import { ChannelChip } from '@/components/ui/channel-chip'
 import { LimitStrip } from '@/components/ui/limit-strip'
 import { Num } from '@/components/ui/num'
 import { VerdictMark } from '@/components/ui/verdict-mark'
 import { defaultLimits, type Finding, sources } from '@/lib/calc/live'
+import { findingEquation } from '@/lib/method/anchors'
 import { findingSentence, findingTitle, findingValue, limitOrigin, limitWords, letterOf } from '@/lib/words/findings'
 import { sourceWords } from '@/lib/words/sources'
 import type { UnitSystem } from '@/lib/units'
@@ -15,19 +17,20 @@ const verdictClass = { outside: 'outside', close: 'close', within: '' } as const
 
 /** One finding: mark, name, value, limit, strip, why and from where. */
 export const FindingRow = memo(function FindingRow({ finding, system, stale, reason }: { finding: Finding, system: UnitSystem, stale: boolean, reason?: string }) {
+  const title = findingTitle(finding, system)
   const value = findingValue(finding, system)
   const origin = limitOrigin[defaultLimits[finding.limitId].from]
   const cited = finding.sourceIds.map((id) => sources[id]).filter((source) => source !== undefined).map(sourceWords).filter((words) => words !== origin)
   return (
     <li className={`find ${verdictClass[finding.verdict]}${stale ? ' stale' : ''}`} data-finding={finding.id}>
       <VerdictMark verdict={finding.verdict} wordless />
-      <b className="what">{findingTitle(finding, system)}{finding.channel ? <> <ChannelChip channel={letterOf(finding.channel)} /></> : null}</b>
+      <b className="what">{title}{finding.channel ? <> <ChannelChip channel={letterOf(finding.channel)} /></> : null}</b>
       <span className="val">{value ? <Num value={value.text} unit={value.unit} bad={finding.verdict === 'outside'} /> : <span className="bad">none</span>}</span>
       <span className="lim">{limitWords(finding, system)}</span>
       <LimitStrip value={finding.value} verdict={finding.verdict} {...(finding.sense === 'atLeast' ? { atLeast: finding.limit } : { atMost: finding.limit })} />
       <span className="why">
         {stale ? <em>As it was before the field that cannot be read. </em> : null}
-        {findingSentence(finding, system)} <span className="srcs">Limit: {[origin, ...cited].join('; ')}</span>
+        {findingSentence(finding, system)} <span className="srcs">Limit: {[origin, ...cited].join('; ')} <EquationLink id={findingEquation[finding.limitId]} of={title} /></span>
         {reason ? <span className="reason">Released with this reason: {reason}</span> : null}
       </span>
     </li>

@@ -1,11 +1,14 @@
 'use client'
 
 import { memo } from 'react'
+import { EquationLink } from '@/components/method/equation-link'
 import { ChannelChip } from '@/components/ui/channel-chip'
 import { Ledger } from '@/components/ui/ledger'
 import { Num } from '@/components/ui/num'
 import { Section } from '@/components/ui/section'
 import type { PartName, Scenario, ScenarioParts } from '@/lib/calc/live'
+import { partEquation } from '@/lib/method/anchors'
+import { partTitle } from '@/lib/words/parts'
 import { formatQuantity, formatQuantityText, type FormatOptions, type QuantityKind, type UnitSystem } from '@/lib/units'
 import { PartView } from './stale-part'
 
@@ -18,6 +21,8 @@ interface LedgersProps {
 
 const channelHeads = [{ head: '' }, { head: <ChannelChip channel="A" />, right: true }, { head: <ChannelChip channel="B" />, right: true }]
 
+const equationOf = (name: PartName) => <EquationLink id={partEquation[name]} of={partTitle[name]} />
+
 /** A quantity of the library as the person reads it. */
 function Quantity({ value, kind, system, ...options }: { value: number, kind: QuantityKind, system: UnitSystem } & FormatOptions) {
   const { text, unit } = formatQuantity(value, kind, system, options)
@@ -28,7 +33,7 @@ function PowerLedger({ parts, stale, scenario, system }: LedgersProps) {
   const rpm = scenario.engine.maxRpm
   const q = (value: number, kind: QuantityKind, options: FormatOptions = {}) => <Quantity value={value} kind={kind} system={system} {...options} />
   return (
-    <Section title={`Power at ${formatQuantityText(rpm, 'engineSpeed', system)}`} level={3}>
+    <Section title={`Power at ${formatQuantityText(rpm, 'engineSpeed', system)}`} level={3} right={equationOf('power')}>
       <PartView name="power" part={parts.power} stale={stale.has('power')}>
         {({ atMax, backupToPrimary, shortOfMbtDeg, curveAssumed }) => (
           <>
@@ -52,7 +57,7 @@ function PowerLedger({ parts, stale, scenario, system }: LedgersProps) {
 function DeadCylinderLedger({ parts, stale, system }: LedgersProps) {
   const percent = (fraction: number) => <Quantity value={fraction} kind="percent" system={system} />
   return (
-    <Section title="Power left with cold cylinders" level={3}>
+    <Section title="Power left with cold cylinders" level={3} right={equationOf('deadCylinders')}>
       <PartView name="deadCylinders" part={parts.deadCylinders} stale={stale.has('deadCylinders')}>
         {({ rows, rpm, frictionPowerKw }) => (
           <>
@@ -76,7 +81,7 @@ function RunUpLedger({ parts, stale, scenario, system }: LedgersProps) {
   const base = scenario.sheet.selection === 'both' ? 'both channels together' : 'the primary'
   const speed = (value: number) => formatQuantityText(value, 'engineSpeed', system)
   return (
-    <Section title={`Expected at run-up, ${speed(scenario.sheet.runUpRpm)} on ${base}`} level={3}>
+    <Section title={`Expected at run-up, ${speed(scenario.sheet.runUpRpm)} on ${base}`} level={3} right={equationOf('runUp')}>
       <PartView name="runUp" part={parts.runUp} stale={stale.has('runUp')}>
         {({ rows }) => (
           <>
@@ -101,7 +106,7 @@ function RunUpLedger({ parts, stale, scenario, system }: LedgersProps) {
 
 function PropellerLedger({ parts, stale, system }: LedgersProps) {
   return (
-    <Section title="Full throttle on the propeller" level={3}>
+    <Section title="Full throttle on the propeller" level={3} right={equationOf('propeller')}>
       <PartView name="propeller" part={parts.propeller} stale={stale.has('propeller')}>
         {({ rows }) => (
           <>
@@ -125,7 +130,7 @@ function PropellerLedger({ parts, stale, system }: LedgersProps) {
 function ProofLedger({ parts, stale, scenario, system }: LedgersProps) {
   const words = (rpm: number | null) => (rpm === null ? 'at no speed' : `from ${formatQuantityText(rpm, 'engineSpeed', system)}`)
   return (
-    <Section title="Where full timing can be proved" level={3}>
+    <Section title="Where full timing can be proved" level={3} right={equationOf('proof')}>
       <PartView name="proof" part={parts.proof} stale={stale.has('proof')}>
         {({ rpm, toleranceDeg }) => (
           <>
@@ -141,7 +146,7 @@ function ProofLedger({ parts, stale, scenario, system }: LedgersProps) {
 function RegisterLedger({ parts, stale, system }: LedgersProps) {
   const angle = (value: number, sign = false) => <Quantity value={value} kind="distributorAngle" system={system} sign={sign} />
   return (
-    <Section title="Rotor register" level={3}>
+    <Section title="Rotor register" level={3} right={equationOf('register')}>
       <PartView name="register" part={parts.register} stale={stale.has('register')}>
         {({ worst, bestPhasingDeg }) => (
           <>

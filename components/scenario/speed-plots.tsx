@@ -1,9 +1,11 @@
 'use client'
 
 import { memo, useMemo } from 'react'
+import { EquationLink } from '@/components/method/equation-link'
 import { LinePlot } from '@/components/plots/line-plot'
 import type { FigureData } from '@/components/ui/figure-data'
 import type { PartName, Scenario, ScenarioParts } from '@/lib/calc/live'
+import { partEquation } from '@/lib/method/anchors'
 import { formatQuantity, unitOf, type QuantityKind, type UnitSystem } from '@/lib/units'
 import { PartView } from './stale-part'
 
@@ -76,7 +78,7 @@ function PowerPlot({ parts, stale, system, name, kind }: SpeedPlotsProps & { kin
 export const SpeedPlots = memo(function SpeedPlots(props: SpeedPlotsProps) {
   return (
     <section aria-labelledby="curves-head">
-      <header className="secline"><h2 id="curves-head">Curves against speed</h2></header>
+      <header className="secline"><h2 id="curves-head">Curves against speed</h2><span className="right fine"><EquationLink id={partEquation.stagger} of="stagger against speed" /></span></header>
       <div className="curves">
         <StaggerPlot {...props} />
         <PowerPlot {...props} kind="power" />

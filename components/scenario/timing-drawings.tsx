@@ -1,10 +1,12 @@
 'use client'
 
 import { useMemo, useState } from 'react'
+import { EquationLink } from '@/components/method/equation-link'
 import { AdvancePlot } from '@/components/plots/advance-plot'
 import type { AdvanceChannel, SpeedMark } from '@/components/plots/advance-curves'
 import { WheelFigure } from '@/components/wheel/wheel-figure'
 import { dependsOnPressure, findSpeedPoint, firingSchedule, type Engine, type PartName, type Scenario, type ScenarioResult, type SpeedPoint } from '@/lib/calc/live'
+import { partEquation } from '@/lib/method/anchors'
 import { formatQuantityText, type UnitSystem } from '@/lib/units'
 import { scheduleKinds } from '@/lib/schemas/scenario-fields'
 import { PartView } from './stale-part'
@@ -89,5 +91,5 @@ function SpeedLine({ point, system }: { point: SpeedPoint | null, system: UnitSy
     formatQuantityText(point.staggerMs, 'timeMs', system, { sign: true }),
     ...(point.plateArcMm === null ? [] : [`${formatQuantityText(point.plateArcMm, 'arc', system, { sign: true })} on the plate`]),
   ]
-  return <p className="fine speedline">Stagger, plus: the backup later. {parts.join(' · ')}</p>
+  return <p className="fine speedline">Stagger, plus: the backup later. {parts.join(' · ')} <EquationLink id={partEquation.curves} of="the advance of a channel" /></p>
 }

@@ -1,5 +1,7 @@
 import type { ChannelName, Finding, ScenarioResult, Verdict } from '../calc/live'
 import { formatQuantity, unitOf, type QuantityKind, type UnitSystem } from '../units'
+import { findingEquation, partEquation } from '../method/anchors'
+import type { EquationId } from '../method/topics'
 import { findingTitle, findingValue, limitWords } from '../words/findings'
 import { keyResults, kindOfLimitUnit, type KeyResult } from './key-results'
 
@@ -18,6 +20,8 @@ export interface ResultRow {
   /** "at least 3.0°"; both where the two sides were judged by different limits. */
   limit: string | null
   unit: { symbol: string; joined: boolean }
+  /** A row's own equation, where its group has none. */
+  equation: EquationId | null
   left: ResultSide | null
   right: ResultSide | null
   /** Right less left, signed; 'same' when it rounds to nothing; null where a side has no number. */
@@ -27,6 +31,7 @@ export interface ResultRow {
 export interface ResultGroup {
   id: string
   title: string
+  equation: EquationId
   rows: ResultRow[]
 }
 
@@ -64,7 +69,7 @@ export function findingRows(left: Result, right: Result, system: UnitSystem): Re
       id, channel: any.channel,
       // The wording of a finding inside its limit names the figure itself.
       label: findingTitle({ ...any, verdict: 'within' }, system),
-      limit: limits.join(', then '), unit: unitFor(kind, system),
+      limit: limits.join(', then '), unit: unitFor(kind, system), equation: findingEquation[any.limitId],
       left: sideOf(was, system), right: sideOf(is, system),
       difference: step(was?.value, is?.value, kind, system),
     }]
@@ -84,9 +89,9 @@ export function keyRows(left: Result, right: Result, system: UnitSystem): Result
       const [was, is] = [group.rows, others].map((list) => list.find((row) => row.id === id))
       const any = is ?? was
       return any
-        ? [{ id, label: any.label, channel: any.channel, limit: null, unit: unitFor(any.kind, system), left: side(was), right: side(is), difference: step(was?.value, is?.value, any.kind, system, any.decimals) }]
+        ? [{ id, label: any.label, channel: any.channel, limit: null, unit: unitFor(any.kind, system), equation: null, left: side(was), right: side(is), difference: step(was?.value, is?.value, any.kind, system, any.decimals) }]
         : []
     })
-    return rows.length > 0 ? [{ id: group.id, title: group.title, rows }] : []
+    return rows.length > 0 ? [{ id: group.id, title: group.title, equation: partEquation[group.id], rows }] : []
   })
 }
