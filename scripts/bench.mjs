@@ -44,6 +44,7 @@ async function run() {
   await seed(database, name)
   const url = database.url(name)
   const evaluate = await measure(['--import', 'tsx', inRoot('bench', 'evaluate.bench.ts')])
+  const faults = await measure(['--import', 'tsx', inRoot('bench', 'redundancy.bench.ts')])
   const port = await freePort()
   const web = await startWeb({ port, databaseUrl: url, development: false })
   const page = await measure([inRoot('bench', 'page.bench.mjs')], { BASE_URL: web.address, CHROMIUM: chromiumPath() })
@@ -51,6 +52,13 @@ async function run() {
   return [
     { what: 'whole evaluation, table schedule, median', measured: evaluate.table, aim: 5, unit: 'ms' },
     { what: 'whole evaluation, formula schedule, median', measured: evaluate.formula, aim: 5, unit: 'ms' },
+    { what: 'fault tree, 25 events: cut sets, value, importance', measured: faults.solved, aim: 5, unit: 'ms' },
+    { what: 'the same, first call', measured: faults.first, aim: 50, unit: 'ms' },
+    { what: 'the same, mean over two intervals', measured: faults.averaged, aim: 5, unit: 'ms' },
+    ...faults.sets.flatMap((/** @type {number} */ sets, /** @type {number} */ i) => [
+      { what: `60 events, 80 gates, tree ${i + 1}, exact value`, measured: faults.exact[i], aim: 100, unit: 'ms' },
+      { what: `60 events, 80 gates, ${sets} cut sets`, measured: faults.cutSets[i], aim: 2000, unit: 'ms' },
+    ]),
     ...page.runs.flatMap((/** @type {{ median: number, p95: number, scrub: number }} */ { median, p95, scrub }, /** @type {number} */ i) => [
       { what: `edit to paint, run ${i + 1}, median of 100`, measured: median, aim: 50, unit: 'ms' },
       { what: `edit to paint, run ${i + 1}, 95th percentile`, measured: p95, aim: 50, unit: 'ms' },

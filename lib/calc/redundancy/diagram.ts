@@ -16,7 +16,10 @@ export interface Diagram {
 }
 
 /** Sizes to try the orders with, and how many of them, so that a bad order costs little where another is good and a hopeless tree does not cost much. */
-const attempts = [{ maxNodes: 5_000, orders: 4 }, { maxNodes: 50_000, orders: 4 }, { maxNodes: 1_500_000, orders: 2 }]
+const mostNodes = 1_500_000
+const attempts = [{ maxNodes: 4_000, orders: 4 }, { maxNodes: 30_000, orders: 4 }, { maxNodes: 200_000, orders: 3 }, { maxNodes: mostNodes, orders: 2 }]
+/** A tree of many parts needs as many nodes at the least. */
+const nodesPerPart = 10
 const stepsPerNode = 20
 
 const build = (tree: ReadyTree, order: readonly number[], maxNodes: number): Diagram => {
@@ -101,7 +104,9 @@ const isSame = (one: readonly number[], other: readonly number[]): boolean => on
 export const diagramOf = (tree: ReadyTree): Diagram => {
   const waiting = variableOrders(tree)
   const tried: number[][] = []
-  for (const { maxNodes, orders } of attempts) {
+  const parts = tree.leaves.length + tree.gates.length
+  for (const { maxNodes: nodes, orders } of attempts) {
+    const maxNodes = Math.min(nodes + nodesPerPart * parts, mostNodes)
     for (let i = 0; i < orders; i += 1) {
       while (tried.length <= i && waiting.length > 0) {
         const next = waiting.shift()?.() ?? []
@@ -116,7 +121,6 @@ export const diagramOf = (tree: ReadyTree): Diagram => {
       }
     }
   }
-  const most = attempts.at(-1)?.maxNodes ?? 0
-  throw tooLarge(tree.given, `a decision diagram of at most ${most} nodes`,
-    `This fault tree is too entangled to be computed exactly: its decision diagram grows past ${most} nodes. Split it, or share fewer events between its branches.`)
+  throw tooLarge(tree.given, `a decision diagram of at most ${mostNodes} nodes`,
+    `This fault tree is too entangled to be computed exactly: its decision diagram grows past ${mostNodes} nodes. Split it, or share fewer events between its branches.`)
 }

@@ -1,3 +1,4 @@
+import { drawTogether } from './draw-together'
 import type { ReadyTree } from './ready-tree'
 
 /** Leaves in the order a walk from the top first meets them; each input list is put in order by `arrange`. */
@@ -38,21 +39,15 @@ const weights = (tree: ReadyTree): Float64Array => {
 }
 
 /**
- * Orders of the leaves worth trying, the best first: a diagram's size hangs on them, and none is best for all trees.
- * Events before gates keeps long chains of gates thin; small branches first keeps what is shared near the top.
+ * Orders of the leaves worth trying, each made when it is asked for: a diagram's size hangs on them, and none is best for all trees.
+ * Events before gates keeps long chains of gates thin; drawing together what meets serves trees that share much.
  */
 export const variableOrders = (tree: ReadyTree): (() => number[])[] => {
   const isGate = (place: number): number => (place >= tree.eventCount ? 1 : 0)
-  return [
-    () => walk(tree, (inputs) => [...inputs].sort((a, b) => isGate(a) - isGate(b))),
-    () => {
-      const weight = weights(tree)
-      return walk(tree, (inputs) => [...inputs].sort((a, b) => (weight[a] ?? 0) - (weight[b] ?? 0)))
-    },
-    () => walk(tree, (inputs) => inputs),
-    () => {
-      const weight = weights(tree)
-      return walk(tree, (inputs) => [...inputs].sort((a, b) => (weight[b] ?? 0) - (weight[a] ?? 0)))
-    },
-  ]
+  const eventsFirst = () => walk(tree, (inputs) => [...inputs].sort((a, b) => isGate(a) - isGate(b)))
+  const byWeight = (sign: number) => {
+    const weight = weights(tree)
+    return walk(tree, (inputs) => [...inputs].sort((a, b) => sign * ((weight[a] ?? 0) - (weight[b] ?? 0))))
+  }
+  return [eventsFirst, () => drawTogether(tree, eventsFirst()), () => drawTogether(tree, byWeight(1)), () => byWeight(-1)]
 }
