@@ -1,4 +1,4 @@
-import type { Engine, ScenarioSheet } from '@/lib/calc/scenario/scenario-types'
+import type { CoilSetup, Engine, ScenarioSheet } from '@/lib/calc/scenario/scenario-types'
 
 /** An invented flat six, as a shop would type it. */
 export const sampleEngine = (change: Partial<Engine> = {}): Engine => ({
@@ -10,6 +10,13 @@ export const sampleEngine = (change: Partial<Engine> = {}): Engine => ({
   crankingSlowestRpm: 160, crankingRpm: 190, crankingFastestRpm: 240, idleSlowestRpm: 760, idleRpm: 820, maxRpm: 2780,
   damperDiameterMm: 170, damperEnd: 'accessory', crankRotation: 'clockwise',
   distributorRotation: 'anticlockwise', capTerminals: [1, 6, 3, 2, 5, 4],
+  ...change,
+})
+
+/** An invented coil with its drive. */
+export const sampleCoil = (change: Partial<CoilSetup> = {}): CoilSetup => ({
+  ohm: 0.7, mh: 4.5, limitA: 7, dwellMs: 4, supplyV: 13.5, crankingV: 8.5, wastedSpark: false,
+  ambientK: 333, thermalResistanceKPerW: 4, secondaryPf: 100, transferEfficiency: 0.5, clampKv: null,
   ...change,
 })
 
@@ -25,7 +32,22 @@ export const sampleSheet = (change: Partial<ScenarioSheet> = {}): ScenarioSheet 
   runUpRpm: 1700,
   manifold: { idleKpa: 40, runUpKpa: 65, fullKpa: 98 },
   rotor: { terminalWidthDeg: 12, rotorWidthDeg: 24, phasedAtDeg: 16, backupPhasedAtDeg: 11, sparkDurationMs: 1.5, mechanicalCarriesRotor: true, plateRadiusMm: 32 },
-  tolerances: { timingCheckDeg: 1, benchDeg: 0.5 },
+  tolerances: { timingCheckDeg: 1, benchDeg: 0.5, markDeg: 0.5, scatterDeg: 0.3 },
+  cycle: {
+    ivcDeg: -122, evoDeg: 116, chargeK: 370, residualFraction: 0.06, airFuelRatio: 12.8, volumetricEfficiency: null,
+    delayShare: 0.12, wallK: 470, headAreaFactor: 1.2,
+  },
+  fuel: { scale: 'ron', octane: 95, worseOctane: 91 },
+  worse: { hotterK: 15, denserKpa: 3 },
+  reference: null,
+  coils: { primary: sampleCoil(), backup: sampleCoil() },
+  plugGapMm: 0.7,
+  airframe: { massKg: 500, wingAreaM2: 11, cd0: 0.032, inducedK: 0.055, propEfficiency: 0.68, minSpeedMps: 32 },
+  conditions: { pressureAltitudeM: 300, temperatureK: 293.15 },
+  redundancy: {
+    ratesPerH: { supply: 5e-5, switch: 1e-5, trigger: 2e-5, module: 4e-5, coil: 3e-5, cap: 2e-5, plug: 1e-5 },
+    hotK: 358, referenceK: 333, activationEv: 0.5, sharedSupply: true, sharedCoil: false, flightHours: 1, checkIntervalHours: 25,
+  },
   notes: '',
   ...change,
 })
