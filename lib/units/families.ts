@@ -93,6 +93,29 @@ export const footPerMinute = unit('ft/min', 0.00508, ['fpm', 'feet/min'])
 export const perSquareDegree = unit('per deg²', 1, ['/deg²', '1/deg²', '/°²', '1/°²', 'per °²', 'deg-2', '°-2'])
 export const millimetrePerDegree = unit('mm/°', 1, ['mm/deg', 'mm per deg', 'mm per degree', 'mm per °'], { word: 'mm per degree' })
 export const inchPerDegree = unit('in/°', 25.4, ['in/deg', 'in per deg', 'in per degree', 'in per °', '"/°'], { word: 'inches per degree' })
+export const perHour = unit('per hour', 1, ['/h', '1/h', 'per h', '/hr', '1/hr', '/hour', '1/hour', 'h-1', 'hour-1'])
+
+export const squareMetre = unit('m²', 1, ['sq m', 'square metre', 'square metres', 'square meter', 'square meters'])
+/** 0.3048² */
+export const squareFoot = unit('ft²', 0.3048 * 0.3048, ['sq ft', 'square foot', 'square feet'])
+
+export const hour = unit('h', 1, ['hr', 'hrs', 'hour', 'hours'])
+const minute = unit('min', 1 / 60, ['mins', 'minute', 'minutes'])
+
+export const ohm = unit('Ω', 1, ['ohm', 'ohms'], { word: 'ohm' })
+const milliohm = unit('mΩ', 0.001, ['mohm', 'milliohm', 'milliohms'])
+export const millihenry = unit('mH', 1, ['millihenry', 'millihenries'])
+const microhenry = unit('µH', 0.001, ['uH', 'microhenry', 'microhenries'])
+export const picofarad = unit('pF', 1, ['picofarad', 'picofarads'])
+const nanofarad = unit('nF', 1000, ['nanofarad', 'nanofarads'])
+export const volt = unit('V', 1, ['volt', 'volts'])
+export const kilovolt = unit('kV', 1000, ['kilovolt', 'kilovolts'])
+export const ampere = unit('A', 1, ['amp', 'amps', 'ampere', 'amperes'])
+const milliampere = unit('mA', 0.001, ['milliamp', 'milliamps'])
+export const millijoule = unit('mJ', 0.001, ['millijoule', 'millijoules'])
+const joule = unit('J', 1, ['joule', 'joules'])
+export const kelvinPerWatt = unit('K/W', 1, ['°C/W', 'degC/W', 'C/W', 'K per W'])
+export const electronvolt = unit('eV', 1, ['electronvolt', 'electronvolts'])
 
 export const families = {
   angle: { name: 'an angle', units: [degree] },
@@ -109,6 +132,17 @@ export const families = {
   velocity: { name: 'a speed', units: [metrePerSecond, kilometrePerHour, knot, milePerHour, footPerMinute] },
   curvature: { name: 'a curvature', units: [perSquareDegree] },
   spacing: { name: 'a spacing of marks', units: [millimetrePerDegree, inchPerDegree] },
+  rate: { name: 'a rate of failure', units: [perHour] },
+  area: { name: 'an area', units: [squareMetre, squareFoot] },
+  duration: { name: 'time', units: [hour, minute] },
+  resistance: { name: 'electrical resistance', units: [ohm, milliohm] },
+  inductance: { name: 'inductance', units: [millihenry, microhenry] },
+  capacitance: { name: 'capacitance', units: [picofarad, nanofarad] },
+  potential: { name: 'voltage', units: [volt, kilovolt] },
+  current: { name: 'electric current', units: [ampere, milliampere] },
+  energy: { name: 'energy', units: [millijoule, joule] },
+  thermalResistance: { name: 'thermal resistance', units: [kelvinPerWatt] },
+  activation: { name: 'an activation energy', units: [electronvolt] },
   fraction: { name: 'a share', units: [one, percent] },
   plain: { name: 'a plain number', units: [one] },
 } as const satisfies Record<string, Family>

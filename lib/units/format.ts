@@ -42,6 +42,21 @@ function roundedDigits(size: number, decimals: number): { whole: string; part: s
 
 const roundHalfUp = (value: bigint, divisor: bigint) => (2n * value + divisor) / (2n * divisor)
 
+const raised = '⁰¹²³⁴⁵⁶⁷⁸⁹'
+
+/** A number times a power of ten, "3.2·10⁻⁶": for chances, where the power is what is read. */
+export function formatPowerOfTen(value: number, decimals: number, sign = false): string {
+  if (!Number.isFinite(value)) throw new RangeError(`A number to show is finite, not ${value}`)
+  if (value === 0) return '0'
+  // The digits are moved as text: 9.96 becomes 1.0·10¹, and no power is too small to divide by.
+  const [mantissa = '0', exponent = '0'] = value.toExponential(decimals).split('e')
+  const power = Number(exponent)
+  const text = formatNumber(Number(mantissa), decimals, sign)
+  if (power === 0) return text
+  const digits = [...String(Math.abs(power))].map((digit) => raised[Number(digit)]).join('')
+  return `${text}·10${power < 0 ? '⁻' : ''}${digits}`
+}
+
 export interface FormatOptions {
   decimals?: number
   /** Plus before positive values: always on differences. */
@@ -50,8 +65,9 @@ export interface FormatOptions {
 
 /** A value in the library's base unit as this system shows it; throws RangeError on what is not finite. */
 export function formatQuantity(value: number, kind: QuantityKind, system: UnitSystem, options: FormatOptions = {}): FormattedQuantity {
-  const { unit, decimals } = shownIn(kind, system)
-  const text = formatNumber(convert(value, quantityOf(kind).base, unit), options.decimals ?? decimals, options.sign)
+  const { unit, decimals, powerOfTen } = shownIn(kind, system)
+  const write = powerOfTen ? formatPowerOfTen : formatNumber
+  const text = write(convert(value, quantityOf(kind).base, unit), options.decimals ?? decimals, options.sign)
   return { text, unit: unit.symbol, joined: unit.joined }
 }
 
@@ -64,8 +80,9 @@ export function formatQuantityText(value: number, kind: QuantityKind, system: Un
 /** A value for a form field: at most six significant digits (more only where the whole part has more), plain ASCII minus and point, no zeros at the end. */
 export function formatInput(value: number, kind: QuantityKind, system: UnitSystem): string {
   if (!Number.isFinite(value)) throw new RangeError(`A number to fill a field with is finite, not ${value}`)
-  const { unit } = shownIn(kind, system)
+  const { unit, powerOfTen } = shownIn(kind, system)
   const converted = convert(value, quantityOf(kind).base, unit)
+  if (powerOfTen && converted !== 0 && Math.abs(converted) < 0.01) return Number(converted.toPrecision(6)).toExponential()
   // Taking 459.67 away leaves dust of 1e-13 where the field should hold 0.
   const shownValue = unit.offset === 0 ? converted : Math.round(converted * 1e9) / 1e9
   const wholeDigits = shownValue === 0 ? 1 : Math.floor(Math.log10(Math.abs(shownValue))) + 1

@@ -1,7 +1,7 @@
 /** The one public face of lib/units: the only place that converts, reads what people type, and writes what they read. */
 export { toCsv } from './csv'
 export type { CsvCell } from './csv'
-export { formatInput, formatNumber, formatQuantity, formatQuantityText } from './format'
+export { formatInput, formatNumber, formatPowerOfTen, formatQuantity, formatQuantityText } from './format'
 export type { FormatOptions, FormattedQuantity } from './format'
 export { keepUntouched, parseQuantity } from './parse'
 export type { QuantityError, QuantityResult, QuantityValue } from './parse'

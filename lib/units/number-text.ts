@@ -51,6 +51,18 @@ function split(body: string, decimal: string, groupMarks: string): Digits {
   return left === null || !/^\d*$/.test(right) || left + right === '' ? null : { text: `${left || '0'}.${right || '0'}` }
 }
 
+const raisedDigits = '⁰¹²³⁴⁵⁶⁷⁸⁹'
+
+/** The power of ten at the start of what stands behind a number, as it was typed and as "e-6": 3.2e-6, 3.2·10⁻⁶, 3.2 x 10^-6. */
+function readPower(behind: string): { typed: string; exponent: string } {
+  const short = /^e[+-]?\d+(?![\d.,])/i.exec(behind)?.[0]
+  if (short !== undefined) return { typed: short, exponent: short }
+  const long = /^ ?[·⋅∙*×x] ?10(?:\^([+-]?\d+)|([⁺⁻]?[⁰¹²³⁴⁵⁶⁷⁸⁹]+))(?![\d.,])/i.exec(behind)
+  if (!long) return { typed: '', exponent: '' }
+  const power = long[1] ?? [...(long[2] ?? '')].map((sign) => (sign === '⁻' ? '-' : sign === '⁺' ? '+' : String(raisedDigits.indexOf(sign)))).join('')
+  return { typed: long[0], exponent: `e${power}` }
+}
+
 export function readNumber(typed: string): NumberText {
   // "2450 1/min": the 1 belongs to the unit, not to the number.
   const text = plainText(typed).replace(/ 1\/(?=[a-z°])/i, ' /')
@@ -60,8 +72,8 @@ export function readNumber(typed: string): NumberText {
   const body = (head?.[2] ?? '').replace(/['’ ]+$/, '')
   if (!/\d/.test(body)) return { ok: false, problem: /\d/.test(text) ? 'malformed' : 'noNumber' }
   const behind = text.slice(text.indexOf(body, sign.length) + body.length)
-  const exponent = /^e[+-]?\d+(?![\d.,])/i.exec(behind)?.[0] ?? ''
-  const rest = behind.slice(exponent.length).trim()
+  const { typed: power, exponent } = readPower(behind)
+  const rest = behind.slice(power.length).trim()
   if (/^\/ ?\d/.test(rest)) return { ok: false, problem: 'fraction' }
 
   const digits = readMarks(body.replaceAll('’', "'"))

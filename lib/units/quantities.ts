@@ -1,7 +1,8 @@
 import {
-  celsius, cubicCentimetre, cubicInch, degree, fahrenheit, fahrenheitStep, foot, footPerMinute, horsepower, inch, inchMercury, inchPerDegree,
-  kelvin, kilogram, kilometrePerHour, kilopascal, kilowatt, knot, metre, metrePerSecond, microsecond, millimetre, millimetrePerDegree,
-  millisecond, newtonMetre, one, percent, perSquareDegree, pound, poundFoot, psi, rpm,
+  ampere, celsius, cubicCentimetre, cubicInch, degree, electronvolt, fahrenheit, fahrenheitStep, foot, footPerMinute, horsepower, hour, inch,
+  inchMercury, inchPerDegree, kelvin, kelvinPerWatt, kilogram, kilometrePerHour, kilopascal, kilovolt, kilowatt, knot, metre, metrePerSecond,
+  microsecond, millihenry, millijoule, millimetre, millimetrePerDegree, millisecond, newtonMetre, ohm, one, percent, perHour, perSquareDegree,
+  picofarad, pound, poundFoot, psi, rpm, squareFoot, squareMetre, volt,
 } from './families'
 import type { FamilyName, Unit } from './families'
 
@@ -13,6 +14,8 @@ export interface Shown {
   unit: Unit
   decimals: number
   example: string
+  /** Written as 3.2·10⁻⁶; the decimals are those before the power of ten. */
+  powerOfTen?: true
 }
 
 export interface Quantity {
@@ -54,10 +57,27 @@ export const quantities = {
   curvature: quantity('curvature', perSquareDegree, shown(perSquareDegree, 5, '0.00045')),
   /** Way on a rim for one degree. */
   markSpacing: quantity('spacing', millimetrePerDegree, shown(millimetrePerDegree, 2, '1.4'), shown(inchPerDegree, 3, '0.055')),
+  /** Failures an hour: anything from a thousandth to a billionth. */
+  failureRate: quantity('rate', perHour, { ...shown(perHour, 1, '3.2e-6'), powerOfTen: true }),
   /** A plain ratio; "85 %" may be typed for 0.85. */
   ratio: quantity('fraction', one, shown(one, 2, '0.85')),
   /** Stored as a fraction, read and typed in percent. */
   percent: quantity('fraction', one, shown(percent, 0, '85')),
+  area: quantity('area', squareMetre, shown(squareMetre, 1, '11.2'), shown(squareFoot, 0, '121')),
+  durationHours: quantity('duration', hour, shown(hour, 1, '25')),
+  resistance: quantity('resistance', ohm, shown(ohm, 2, '0.7')),
+  inductance: quantity('inductance', millihenry, shown(millihenry, 1, '4.5')),
+  capacitance: quantity('capacitance', picofarad, shown(picofarad, 0, '100')),
+  voltage: quantity('potential', volt, shown(volt, 1, '13.5')),
+  voltageKv: quantity('potential', kilovolt, shown(kilovolt, 1, '18')),
+  current: quantity('current', ampere, shown(ampere, 1, '6.5')),
+  energyMj: quantity('energy', millijoule, shown(millijoule, 0, '90')),
+  thermalResistance: quantity('thermalResistance', kelvinPerWatt, shown(kelvinPerWatt, 1, '4')),
+  activationEnergy: quantity('activation', electronvolt, shown(electronvolt, 2, '0.5')),
+  /** Of one scale: nothing converts it. */
+  octane: quantity('plain', one, shown(one, 1, '95')),
+  /** Drag and other numbers without a unit that need the third decimal. */
+  coefficient: quantity('plain', one, shown(one, 3, '0.032')),
   count: quantity('plain', one, shown(one, 0, '6')),
   plain: quantity('plain', one, shown(one, 2, '1.5')),
 } as const satisfies Record<string, Quantity>

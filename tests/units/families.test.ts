@@ -28,6 +28,7 @@ const inMathjs: Record<FamilyName, { base: string; units: Record<string, string>
   velocity: { base: 'm / s', units: { 'm/s': 'm / s', 'km/h': 'km / hour', kt: '1852 m / hour', mph: 'mile / hour', 'ft/min': 'ft / minute' } },
   curvature: { base: 'deg^-2', units: { 'per deg²': 'deg^-2' } },
   spacing: { base: 'm / deg', units: { 'mm/°': 'mm / deg', 'in/°': 'inch / deg' } },
+  rate: { base: 'hour^-1', units: { 'per hour': '1 / hour' } },
   fraction: { base: '', units: { '': '1', '%': '1%' } },
   plain: { base: '', units: { '': '1' } },
 }

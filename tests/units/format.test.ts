@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest'
-import { formatInput, formatNumber, formatQuantity, formatQuantityText } from '@/lib/units/format'
+import { formatInput, formatNumber, formatPowerOfTen, formatQuantity, formatQuantityText } from '@/lib/units/format'
 import type { QuantityKind, UnitSystem } from '@/lib/units/quantities'
 import { unitOf } from '@/lib/units/quantities'
 import { someCases } from '@/tests/support/cases'
@@ -27,6 +27,20 @@ describe('numbers as shown', () => {
   })
 })
 
+describe('numbers times a power of ten', () => {
+  it.each(someCases<readonly [number, number, string]>([
+    [3.2e-6, 1, '3.2·10⁻⁶'], [1e-5, 1, '1.0·10⁻⁵'], [9.96e-6, 1, '1.0·10⁻⁵'], [-3.2e-6, 1, '\u22123.2·10⁻⁶'], [4.4e-12, 0, '4·10⁻¹²'],
+    [0, 1, '0'], [1.5, 1, '1.5'], [25, 1, '2.5·10¹'], [5e-324, 1, '4.9·10⁻³²⁴'], [1.7e308, 1, '1.7·10³⁰⁸'],
+  ]))('%d to %d decimals', (value, decimals, text) => {
+    expect(formatPowerOfTen(value, decimals)).toBe(text)
+  })
+
+  it('shows the sign where asked, and refuses what is not finite', () => {
+    expect(formatPowerOfTen(3.2e-6, 1, true)).toBe('+3.2·10⁻⁶')
+    expect(() => formatPowerOfTen(NaN, 1)).toThrow(RangeError)
+  })
+})
+
 describe('quantities as shown', () => {
   it.each(someCases<readonly [number, QuantityKind, UnitSystem, string, string, boolean]>([
     [26.5, 'angle', 'metric', '26.5', '°', true], [50, 'power', 'metric', '50.0', 'kW', false], [50, 'power', 'us', '67.1', 'hp', false],
@@ -34,6 +48,7 @@ describe('quantities as shown', () => {
     [20, 'temperatureDifference', 'us', '36', '°F', false], [1524, 'altitude', 'us', '5000', 'ft', false], [33.0555555, 'airspeed', 'metric', '119', 'km/h', false],
     [90, 'boreLength', 'us', '3.543', 'in', false], [90, 'boreLength', 'metric', '90.0', 'mm', false], [2596, 'displacement', 'us', '158', 'cu in', false], [0.912, 'percent', 'metric', '91', '%', false],
     [0.912, 'ratio', 'us', '0.91', '', false], [3.3, 'climb', 'us', '650', 'ft/min', false], [10.9, 'meanPressure', 'us', '2', 'psi', false],
+    [3.2e-6, 'failureRate', 'us', '3.2·10⁻⁶', 'per hour', false],
   ]))('%d as %s in %s', (value, kind, system, text, unit, joined) => {
     expect(formatQuantity(value, kind, system)).toEqual({ text, unit, joined })
   })
