@@ -61,6 +61,7 @@ const list: readonly Source[] = [
   { id: 'gum-2008', author: 'Joint Committee for Guides in Metrology', title: 'JCGM 100, Guide to the expression of uncertainty in measurement', year: 2008, provenance: 'read', use: 'Combination of uncertainties, effective degrees of freedom, Student’s t (table G.2); examples H.1 to H.3' },
   { id: 'hill-1970', author: 'G. W. Hill', title: 'Algorithm 395: Student’s t-distribution, Communications of the ACM 13', year: 1970, provenance: 'memory', use: 'Expansion of Student’s t about the normal value for many degrees of freedom' },
   { id: 'wichura-1988', author: 'M. J. Wichura', title: 'Algorithm AS 241: The percentage points of the normal distribution, Applied Statistics 37', year: 1988, provenance: 'memory', use: 'Normal quantiles' },
+  { id: 'normal-table', author: 'statistics tables', title: 'Table of the normal distribution', year: null, provenance: 'memory', use: 'Normal values at the usual coverages' },
   { id: 'bissell-1990', author: 'A. F. Bissell', title: 'How reliable is your capability index?, Applied Statistics 39', year: 1990, provenance: 'memory', use: 'Interval of a capability index' },
   { id: 'capability-example', author: 'SAS Institute', title: 'QC user’s guide, example 5.3', year: null, provenance: 'read', use: 'Capability interval of 75 measured amplifications' },
   { id: 'chart-constants', author: 'quality control handbooks', title: 'Factors of control charts', year: null, provenance: 'read', use: 'd2 and D4 for ranges of two values' },

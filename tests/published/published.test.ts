@@ -21,6 +21,8 @@ const covered = [
   'coilCurrentA', 'stalledCurrentA', 'dwellForCurrentMs', 'sparkEnergyMj', 'sparksPerSecond', 'dwellAvailableMs', 'sparkPeriodShare', 'coilHeat',
   'breakdownKv', 'sparkDemandKv', 'sparkMargin', 'pistonTravelMm', 'cylinderVolumeCc',
   'eventProbability', 'faultTreeProbability', 'timeAveragedProbability', 'minimalCutSets', 'importance', 'singlePoints', 'rateSensitivity',
+  'normalQuantile', 'studentTQuantile', 'combineUncertainty', 'leastSquares', 'linearTrend', 'processCapability', 'cpkInterval', 'individualsChart',
+  'evaluateBenchRun', 'benchReadingsToAdvance', 'evaluateTimingCheck', 'evaluateRunUp',
 ]
 
 it('no function goes without a check', () => {

@@ -17,12 +17,14 @@ export interface LeastSquares {
   readonly residualSd: number
   /** `null` when the values do not vary: there is nothing to explain. */
   readonly rSquared: number | null
-  /** `null` when no column is left beside the constant one, or when nothing is left unexplained. */
+  /** `null` when no column is left beside the constant one, or when nothing beyond rounding is left unexplained. */
   readonly fStatistic: number | null
 }
 
 /** A column that adds less than this to the others, as a share of its length, is rounding. */
 const leastShare = 1e-13
+/** Squares left over that are less than this share of the values' own are rounding. */
+const leastSquaresShare = 1e-28
 /** More columns are a mistake, and would take minutes. */
 const mostColumns = 50
 
@@ -37,7 +39,7 @@ const takeRows = (given: unknown): number[][] => {
     rows.push(takeNumbers(row, `rows.${i}`, { unit: '' }, (j) => `Entry ${j + 1} of row ${i + 1}`))
   }
   if (rows.length <= width) {
-    throw new CalcError({ field: 'rows', value: given, limit: `more than ${width} rows`, unit: '', message: `${width} coefficients need more than ${width} rows, so that something is left to judge the fit by; ${rows.length} were given.` })
+    throw new CalcError({ field: 'rows', value: given, limit: `more than ${width} rows`, unit: '', message: `There must be more rows than coefficients, more than ${width}, so that something is left to judge the fit by; ${rows.length} were given.` })
   }
   return rows
 }
@@ -97,7 +99,8 @@ export const leastSquares = (input: LeastSquaresInput): LeastSquares => {
 
   const hasConstant = columns.some((column) => column[0] !== 0 && column.every((entry) => entry === column[0]))
   const { largest, shares } = squaresAbout(side, hasConstant ? meanOf(side) : 0)
-  const sst = hasConstant ? largest * largest * shares : side.reduce((sum, entry) => sum + entry * entry, 0)
+  const whole = side.reduce((sum, entry) => sum + entry * entry, 0)
+  const sst = hasConstant ? largest * largest * shares : whole
   const explaining = hasConstant ? width - 1 : width
   const of = (result: number): number => finiteResult(result, 'values', members.values)
   return {
@@ -105,6 +108,6 @@ export const leastSquares = (input: LeastSquaresInput): LeastSquares => {
     standardErrors: inverseRowLengths(factors).map((length, j) => of(((length * spread) / (scales[j] ?? 1)) * valueScale)),
     residualSd: of(spread * valueScale),
     rSquared: sst === 0 ? null : of(1 - sse / sst),
-    fStatistic: explaining === 0 || sse === 0 ? null : of((sst - sse) / explaining / (spread * spread)),
+    fStatistic: explaining === 0 || sse <= leastSquaresShare * whole ? null : of((sst - sse) / explaining / (spread * spread)),
   }
 }
