@@ -93,7 +93,7 @@ export const footPerMinute = unit('ft/min', 0.00508, ['fpm', 'feet/min'])
 export const perSquareDegree = unit('per deg²', 1, ['/deg²', '1/deg²', '/°²', '1/°²', 'per °²', 'deg-2', '°-2'])
 export const millimetrePerDegree = unit('mm/°', 1, ['mm/deg', 'mm per deg', 'mm per degree', 'mm per °'], { word: 'mm per degree' })
 export const inchPerDegree = unit('in/°', 25.4, ['in/deg', 'in per deg', 'in per degree', 'in per °', '"/°'], { word: 'inches per degree' })
-export const perHour = unit('per hour', 1, ['/h', '1/h', 'per h', '/hr', '1/hr', '/hour', '1/hour', 'h-1', 'hour-1'])
+export const perHour = unit('/h', 1, ['1/h', 'per hour', 'per h', '/hr', '1/hr', '/hour', '1/hour', 'h-1', 'hour-1'], { word: 'per hour' })
 
 export const squareMetre = unit('m²', 1, ['sq m', 'square metre', 'square metres', 'square meter', 'square meters'])
 /** 0.3048² */

@@ -48,7 +48,7 @@ describe('quantities as shown', () => {
     [20, 'temperatureDifference', 'us', '36', '°F', false], [1524, 'altitude', 'us', '5000', 'ft', false], [33.0555555, 'airspeed', 'metric', '119', 'km/h', false],
     [90, 'boreLength', 'us', '3.543', 'in', false], [90, 'boreLength', 'metric', '90.0', 'mm', false], [2596, 'displacement', 'us', '158', 'cu in', false], [0.912, 'percent', 'metric', '91', '%', false],
     [0.912, 'ratio', 'us', '0.91', '', false], [3.3, 'climb', 'us', '650', 'ft/min', false], [10.9, 'meanPressure', 'us', '2', 'psi', false],
-    [3.2e-6, 'failureRate', 'us', '3.2·10⁻⁶', 'per hour', false],
+    [3.2e-6, 'failureRate', 'us', '3.2·10⁻⁶', '/h', false],
   ]))('%d as %s in %s', (value, kind, system, text, unit, joined) => {
     expect(formatQuantity(value, kind, system)).toEqual({ text, unit, joined })
   })
@@ -77,7 +77,7 @@ describe('quantities as shown', () => {
 describe('values in a form field', () => {
   it.each(someCases<readonly [number, QuantityKind, UnitSystem, string]>([
     [26.5, 'angle', 'metric', '26.5'], [-4, 'angle', 'metric', '-4'], [0, 'angle', 'metric', '0'], [-0, 'angle', 'metric', '0'], [86.123456789, 'length', 'metric', '86.1235'], [86.36, 'length', 'us', '3.4'],
-    [10000, 'engineSpeed', 'us', '10000'], [1234567, 'plain', 'us', '1234567'], [0.00045, 'curvature', 'us', '0.00045'], [4.5e-7, 'curvature', 'us', '4.5e-7'],
+    [10000, 'engineSpeed', 'us', '10000'], [1234567, 'plain', 'us', '1234567'], [0.00045, 'curvature', 'us', '0.00045'], [5e-5, 'failureRate', 'metric', '5e-5'], [3.21234567e-6, 'failureRate', 'metric', '3.21235e-6'], [0, 'failureRate', 'us', '0'], [0.5, 'failureRate', 'us', '0.5'], [4.5e-7, 'curvature', 'us', '4.5e-7'],
     [255.3722222222222, 'temperature', 'us', '0'], [273.15, 'temperature', 'metric', '0'], [293.15, 'temperature', 'metric', '20'], [0.91, 'percent', 'us', '91'], [1 / 3, 'ratio', 'us', '0.333333'],
   ]))('%d as %s in %s', (value, kind, system, text) => {
     expect(formatInput(value, kind, system)).toBe(text)
