@@ -4,7 +4,7 @@ export const statistics = defineTopic({
   id: 'statistics',
   title: 'Trend, capability and control',
   intro: 'How timing creeps with engine hours, and how evenly the shop makes its units.',
-  functions: ['linearTrend', 'processCapability', 'individualsChart'],
+  functions: ['linearTrend', 'leastSquares', 'processCapability', 'cpkInterval', 'individualsChart'],
   equations: [
     {
       id: 'trend', title: 'Trend and its band', tex: String.raw`\hat{y}(h) = b_0 + b_1 h \;\pm\; t_\nu\, s \sqrt{1 + \frac{1}{N} + \frac{(h - \bar{h})^2}{\sum (h_i - \bar{h})^2}}`,
@@ -19,6 +19,18 @@ export const statistics = defineTopic({
       sources: ['nist-norris'],
     },
     {
+      id: 'least-squares', title: 'Least squares of several columns', tex: String.raw`\min_{b} \sum_i \left(y_i - \sum_j x_{ij}\, b_j\right)^2, \qquad s = \sqrt{\frac{1}{N - p} \sum_i \left(y_i - \sum_j x_{ij}\, b_j\right)^2}`,
+      note: 'By reflections, never by the normal equations, and refined once with residuals in twice the digits. Columns that follow from each other are refused.',
+      symbols: [
+        { tex: 'y_i', meaning: 'values', unit: 'that of the values' },
+        { tex: 'x_{ij}', meaning: 'columns; a constant term is a column of ones', unit: 'that of the column' },
+        { tex: 'b_j', meaning: 'coefficients', unit: 'value over column' },
+        { tex: 's', meaning: 'residual standard deviation', unit: 'that of the values' },
+        { tex: 'N, p', meaning: 'number of values, of columns', unit: 'no unit', range: 'more values than columns' },
+      ],
+      sources: ['nist-norris', 'nist-pontius', 'nist-longley', 'nist-misra1a'],
+    },
+    {
       id: 'capability', title: 'Process capability', tex: String.raw`C_p = \frac{U - L}{6 s}, \qquad C_{pk} = \frac{\min\left(U - \bar{x},\, \bar{x} - L\right)}{3 s}, \qquad C_{pm} = \frac{U - L}{6\sqrt{s^2 + (\bar{x} - T)^2}}`,
       symbols: [
         { tex: 'U, L', meaning: 'upper and lower limit', unit: 'that of the values', range: 'upper above lower' },
@@ -27,6 +39,16 @@ export const statistics = defineTopic({
         { tex: 'C_p, C_{pk}, C_{pm}', meaning: 'capability: of the spread, of the worse side, about the target', unit: 'no unit' },
       ],
       sources: ['nist-handbook'],
+    },
+    {
+      id: 'capability-interval', title: 'How sure a capability is', tex: String.raw`C_{pk} \pm z \sqrt{\frac{1}{9 N} + \frac{C_{pk}^2}{2\,(N - 1)}}`,
+      note: 'An approximation for values that spread normally.',
+      symbols: [
+        { tex: 'C_{pk}', meaning: 'capability of the worse side, as above', unit: 'no unit' },
+        { tex: 'z', meaning: 'normal value of the coverage asked for', unit: 'no unit' },
+        { tex: 'N', meaning: 'number of values', unit: 'no unit', range: '2 and up; good from about 25' },
+      ],
+      sources: ['bissell-1990'],
     },
     {
       id: 'individuals-chart', title: 'Control chart of single values', tex: String.raw`\bar{x} \pm 3\,\frac{\overline{MR}}{1.128}, \qquad MR_\mathrm{upper} = 3.267\,\overline{MR}`,

@@ -4,7 +4,7 @@ export const uncertainty = defineTopic({
   id: 'uncertainty',
   title: 'Stack of tolerances',
   intro: 'Many small tolerances add up: as a likely spread, and at worst. Both are shown, because a spread hides the rare unit in which all of them lean one way.',
-  functions: ['combineUncertainty'],
+  functions: ['combineUncertainty', 'studentTQuantile', 'normalQuantile'],
   equations: [
     {
       id: 'combined-uncertainty', title: 'Combined uncertainty', tex: String.raw`u = \sqrt{\sum_i c_i^2 u_i^2}, \qquad u_i = \sigma,\; \frac{a}{\sqrt{3}},\; \frac{a}{\sqrt{6}}, \qquad U = k\, u`,
@@ -28,6 +28,17 @@ export const uncertainty = defineTopic({
         { tex: 'u, c_i, u_i', meaning: 'uncertainties and sensitivities as above', unit: 'that of the result' },
       ],
       sources: ['gum-2008'],
+    },
+    {
+      id: 'student-t', title: 'Student t', tex: String.raw`P = 1 - \tfrac{1}{2}\, I_x\left(\tfrac{\nu}{2}, \tfrac{1}{2}\right), \qquad x = \frac{\nu}{\nu + t^2}`,
+      note: 'Solved for t. From 20 000 degrees of freedom an expansion about the normal value takes over; without end it is the normal value.',
+      symbols: [
+        { tex: 't', meaning: 'value that is not exceeded with the chance P', unit: 'no unit' },
+        { tex: 'P', meaning: 'chance; one half plus half the coverage for a band to both sides', unit: 'no unit', range: 'between 0 and 1' },
+        { tex: 'I_x, x', meaning: 'regularised incomplete beta function, its argument', unit: 'no unit' },
+        { tex: String.raw`\nu`, meaning: 'degrees of freedom, whole or not', unit: 'no unit', range: '0.001 and up' },
+      ],
+      sources: ['hill-1970', 'wichura-1988'],
     },
     {
       id: 'worst-case', title: 'Worst case', tex: String.raw`w = \sum_i |c_i|\, a_i`,
