@@ -1,4 +1,5 @@
 import type { Engine, ScenarioSheet } from '../calc/live'
+import { statedDefaults } from './stated-defaults'
 
 /** Middle of the published curvatures (1.8e-4 to 4e-4 per degree²). */
 const defaultCurvature = 3e-4
@@ -12,7 +13,9 @@ const roundTo = (value: number, step: number) => Math.round(value / step) * step
 export function startingSheet(engine: Engine): ScenarioSheet {
   const primaryDeg = engine.powerTimingDeg
   const backupDeg = primaryDeg - 8
+  const { tolerances, ...others } = statedDefaults()
   return {
+    ...others,
     distribution: 'sharedCap',
     plugsPerCylinder: 1,
     selection: 'oneAtATime',
@@ -26,7 +29,7 @@ export function startingSheet(engine: Engine): ScenarioSheet {
       terminalWidthDeg: 12, rotorWidthDeg: 24, phasedAtDeg: roundTo((primaryDeg + backupDeg) / 2 - 6, 1), backupPhasedAtDeg: roundTo(backupDeg - 6, 1),
       sparkDurationMs: 1.5, mechanicalCarriesRotor: true, plateRadiusMm: null,
     },
-    tolerances: { timingCheckDeg: 1, benchDeg: 0.5 },
+    tolerances: { timingCheckDeg: 1, benchDeg: 0.5, ...tolerances },
     notes: '',
   }
 }

@@ -1,4 +1,7 @@
+import { coilFields, plugFields } from './coil-fields'
+import { chargeFields, fuelFields } from './detonation-fields'
 import type { FieldDef } from './field'
+import { placeFields, redundancyFields } from './flight-fields'
 
 export const scheduleKinds = [
   { value: 'fixed', label: 'fixed' },
@@ -69,8 +72,15 @@ export const scenarioSections = [
   { id: 'distribution', title: 'How the sparks are shared out' },
   { id: 'torque', title: 'Best torque' },
   { id: 'propeller', title: 'Propeller and run-up' },
-  { id: 'manifold', title: 'Manifold pressure' },
+  { id: 'fuel', title: 'Fuel and detonation' },
+  { id: 'place', title: 'Aeroplane and place' },
   { id: 'rotor', title: 'Rotor and plate' },
+  { id: 'primaryCoil', title: 'Primary coil' },
+  { id: 'backupCoil', title: 'Backup coil' },
+  { id: 'plugs', title: 'Plugs' },
+  { id: 'charge', title: 'Charge and burn' },
+  { id: 'failures', title: 'Chances of failure' },
+  { id: 'manifold', title: 'Manifold pressure' },
   { id: 'tolerances', title: 'Tolerances' },
 ] as const
 
@@ -123,7 +133,16 @@ export const scenarioFieldsBySection: Record<ScenarioSection, readonly FieldDef[
   tolerances: [
     { name: 'tolerances.timingCheckDeg', label: 'Timing check', kind: 'number', quantity: 'angle', min: 0.1, max: 5, path: 'tolerances', help: 'Handbooks say 1 to 2 degrees either way.' },
     { name: 'tolerances.benchDeg', label: 'Bench reading', kind: 'number', quantity: 'angle', min: 0.05, max: 5, path: 'tolerances' },
+    { name: 'tolerances.markDeg', label: 'Reading a mark', kind: 'number', quantity: 'angle', min: 0, max: 5, path: 'tolerances', help: 'How far off a mark may be read by light, either way.' },
+    { name: 'tolerances.scatterDeg', label: 'Scatter of the spark', kind: 'number', quantity: 'angle', min: 0, max: 5, path: 'tolerances', help: 'From spark to spark and cylinder to cylinder, one standard deviation.' },
   ],
+  fuel: fuelFields,
+  place: placeFields,
+  primaryCoil: coilFields('primary'),
+  backupCoil: coilFields('backup'),
+  plugs: plugFields,
+  charge: chargeFields,
+  failures: redundancyFields,
 }
 
 export const scenarioFields: readonly FieldDef[] = scenarioSections.flatMap(({ id }) => scenarioFieldsBySection[id])

@@ -2,6 +2,8 @@ import type { ScenarioSheet } from '../calc/live'
 import { formatInput, type UnitSystem } from '../units'
 import { channelToForm, isScheduleKind, numbersOfChannel, readChannel } from './channel-form'
 import { fieldIndex, type FieldErrors, type FormValues } from './field'
+import { modelFieldOf } from './model-fields'
+import { modelToForm, numbersOfModel, readModel } from './model-form'
 import { fieldReader, placeIssues } from './read-fields'
 import { scenarioSheet, scenarioTitle, type CheckedSheet } from './scenario'
 import { maxPitches, scenarioFields, type ChannelPrefix } from './scenario-fields'
@@ -38,6 +40,9 @@ function numbersOfSheet(sheet: ScenarioSheet): Record<string, number | null> {
     'rotor.plateRadiusMm': rotor.plateRadiusMm,
     'tolerances.timingCheckDeg': tolerances.timingCheckDeg,
     'tolerances.benchDeg': tolerances.benchDeg,
+    'tolerances.markDeg': tolerances.markDeg,
+    'tolerances.scatterDeg': tolerances.scatterDeg,
+    ...numbersOfModel(sheet),
   }
 }
 
@@ -55,6 +60,7 @@ export function scenarioToForm(title: string, sheet: ScenarioSheet, system: Unit
   }
   return {
     ...form,
+    ...modelToForm(sheet, system),
     title,
     notes: sheet.notes,
     distribution: sheet.distribution,
@@ -104,7 +110,11 @@ export function formToScenario(values: FormValues, system: UnitSystem, base?: Sc
       mechanicalCarriesRotor: read.check('rotor.mechanicalCarriesRotor'),
       plateRadiusMm: number('rotor.plateRadiusMm'),
     },
-    tolerances: { timingCheckDeg: number('tolerances.timingCheckDeg'), benchDeg: number('tolerances.benchDeg') },
+    tolerances: {
+      timingCheckDeg: number('tolerances.timingCheckDeg'), benchDeg: number('tolerances.benchDeg'),
+      markDeg: number('tolerances.markDeg'), scatterDeg: number('tolerances.scatterDeg'),
+    },
+    ...readModel(read),
     notes: values.notes ?? '',
   }
   const sheet = scenarioSheet.safeParse(raw)
@@ -127,7 +137,7 @@ export function fieldOfSheetPath(path: readonly string[], values: FormValues, pi
     return `pitch.${row}.${fourth || 'name'}`
   }
   if (head === 'manifold' || head === 'rotor' || head === 'tolerances') return `${head}.${second}`
-  return head
+  return modelFieldOf(path) ?? head
 }
 
 function fieldOfChannelPath(channel: ChannelPrefix, second: string, third: string, values: FormValues): string {

@@ -1,5 +1,6 @@
 import { z } from 'zod'
 import type { Channel, ScenarioSheet } from '../calc/live'
+import { modelMembers } from './model-schema'
 import { isAscending, numbersOf } from './number-schema'
 import { maxPitches, scenarioFields, type ChannelPrefix } from './scenario-fields'
 
@@ -81,7 +82,10 @@ export const scenarioSheet = z.object({
     mechanicalCarriesRotor: z.boolean(),
     plateRadiusMm: num('rotor.plateRadiusMm').nullable(),
   }),
-  tolerances: z.object({ timingCheckDeg: num('tolerances.timingCheckDeg'), benchDeg: num('tolerances.benchDeg') }),
+  tolerances: z.object({
+    timingCheckDeg: num('tolerances.timingCheckDeg'), benchDeg: num('tolerances.benchDeg'), markDeg: num('tolerances.markDeg'), scatterDeg: num('tolerances.scatterDeg'),
+  }),
+  ...modelMembers,
   notes: z.string().max(4000, 'The notes are longer than 4000 characters.'),
 }) satisfies z.ZodType<ScenarioSheet>
 
@@ -91,4 +95,4 @@ export type CheckedSheet = z.infer<typeof scenarioSheet>
 export const scenarioTitle = z.string().trim().min(1, 'Give the scenario a name.').max(120, 'The name is longer than 120 characters.')
 
 /** Version of the stored sheet; a reader of an older one migrates it. */
-export const sheetVersion = 1
+export const sheetVersion = 2

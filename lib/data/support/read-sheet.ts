@@ -1,6 +1,7 @@
 import 'server-only'
 import type { ScenarioSheet } from '@/lib/calc/live'
 import { AppError } from '@/lib/errors'
+import { liftSheet } from '@/lib/schemas/lift-sheet'
 import { scenarioSheet, sheetVersion } from '@/lib/schemas/scenario'
 import { toDto } from './dto'
 
@@ -10,5 +11,5 @@ import { toDto } from './dto'
  */
 export function readSheet(stored: unknown, version: number): ScenarioSheet {
   if (version > sheetVersion) throw new AppError('newerSheet')
-  return toDto(scenarioSheet, stored)
+  return toDto(scenarioSheet, liftSheet(stored, version, sheetVersion))
 }
