@@ -12,8 +12,14 @@ export type LimitId =
   | 'freeDeg'
   | 'leadsOutOfPlace'
   | 'markSpacingMm'
+  | 'detonationDeg'
+  | 'windingK'
+  | 'sparkVoltageRatio'
+  | 'periodShare'
+  | 'climbMps'
+  | 'noSparkPerH'
 
-export type LimitUnit = 'deg' | 'rpm' | 'ratio' | 'distributorDeg' | 'mmPerDeg' | 'count'
+export type LimitUnit = 'deg' | 'rpm' | 'ratio' | 'distributorDeg' | 'mmPerDeg' | 'count' | 'kelvin' | 'mps' | 'perHour'
 
 export interface Limit {
   id: LimitId
@@ -22,8 +28,8 @@ export interface Limit {
   /** A value inside the limit by less than this is close. */
   closeBand: number
   unit: LimitUnit
-  /** 'shop': the shop's choice · 'commonPractice': common practice, no published source · 'geometry': follows from the drawing. */
-  from: 'shop' | 'commonPractice' | 'geometry'
+  /** 'shop': the shop's choice · 'commonPractice': common practice, no published source · 'geometry': follows from the drawing · 'insulationClass', 'hazardous': a publication, named in lib/words. */
+  from: 'shop' | 'commonPractice' | 'geometry' | 'insulationClass' | 'hazardous'
 }
 
 export type Limits = Record<LimitId, Limit>
@@ -44,6 +50,13 @@ export const defaultLimits: Limits = {
   freeDeg: limit('freeDeg', 'atLeast', 15, 'distributorDeg', 'shop'),
   leadsOutOfPlace: limit('leadsOutOfPlace', 'atMost', 0, 'count', 'geometry'),
   markSpacingMm: limit('markSpacingMm', 'atLeast', 1, 'mmPerDeg', 'shop'),
+  // Worst case; close where only the low end of its uncertainty lies outside.
+  detonationDeg: limit('detonationDeg', 'atLeast', 3, 'deg', 'shop'),
+  windingK: limit('windingK', 'atMost', 428, 'kelvin', 'insulationClass', 15),
+  sparkVoltageRatio: limit('sparkVoltageRatio', 'atLeast', 1.5, 'ratio', 'shop'),
+  periodShare: limit('periodShare', 'atMost', 0.85, 'ratio', 'shop'),
+  climbMps: limit('climbMps', 'atLeast', 0.5, 'mps', 'shop', 0.25),
+  noSparkPerH: limit('noSparkPerH', 'atMost', 1e-5, 'perHour', 'hazardous'),
 }
 
 export type Verdict = 'outside' | 'close' | 'within'

@@ -69,6 +69,8 @@ const list: readonly Source[] = [
   { id: 'nist-norris', author: 'National Institute of Standards and Technology', title: 'Statistical Reference Datasets, Norris', year: null, provenance: 'read', use: 'Certified values of a least-squares line' },
   { id: 'nist-longley', author: 'National Institute of Standards and Technology', title: 'Statistical Reference Datasets, Longley', year: null, provenance: 'read', use: 'Certified values of least squares with seven columns that nearly depend on each other' },
   { id: 'nist-misra1a', author: 'National Institute of Standards and Technology', title: 'Statistical Reference Datasets, Misra1a', year: null, provenance: 'read', use: 'Certified values of a curve of the form of a coil’s current' },
+  { id: 'iec-60085', author: 'International Electrotechnical Commission', title: 'IEC 60085, Electrical insulation: thermal evaluation and designation', year: null, provenance: 'memory', use: 'Temperature of insulation class F, 155 °C' },
+  { id: 'ac-23-1309-1e', author: 'Federal Aviation Administration', title: 'AC 23.1309-1E, System safety analysis and assessment for Part 23 airplanes', year: null, provenance: 'memory', use: 'Orders of magnitude for failure conditions of small single-engine aeroplanes, for orientation; read second-hand' },
   { id: 'trade', author: 'the trade', title: 'Common practice', year: null, provenance: 'common practice', use: 'Facts of the trade without a published source' },
 ]
 

@@ -13,6 +13,14 @@ const inputsOfPart: Record<PartName, readonly string[]> = {
   leads: ['distribution'],
   proof: ['primary', 'backup', 'tolerances.timingCheckDeg', 'manifold'],
   marks: [],
+  coils: ['coils', 'distribution', 'rotor.sparkDurationMs'],
+  climb: ['primary', 'backup', 'mbt', 'plugsPerCylinder', 'propeller', 'manifold.fullKpa', 'airframe', 'conditions'],
+  redundancy: ['redundancy', 'distribution', 'selection'],
+  stack: ['tolerances'],
+  charge: ['mbt', 'plugsPerCylinder', 'cycle', 'primary', 'manifold.fullKpa', 'propeller'],
+  detonation: ['primary', 'backup', 'mbt', 'plugsPerCylinder', 'cycle', 'fuel', 'worse', 'reference', 'conditions', 'manifold.fullKpa', 'propeller'],
+  pressure: ['primary', 'backup', 'mbt', 'plugsPerCylinder', 'cycle', 'manifold.fullKpa', 'propeller'],
+  spark: ['primary', 'backup', 'mbt', 'plugsPerCylinder', 'cycle', 'coils', 'plugGapMm', 'worse', 'manifold.fullKpa', 'propeller'],
 }
 
 const touches = (input: string, changed: string) => changed === input || changed.startsWith(`${input}.`) || input.startsWith(`${changed}.`)

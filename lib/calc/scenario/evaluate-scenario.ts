@@ -3,11 +3,16 @@ import { staggerReport } from '../advance/stagger-report'
 import { defaultLimits, type Limits } from '../limits'
 import type { Notice } from '../notice'
 import { calcVersion } from '../version'
+import { addCycleLayer, cycleNotComputed } from './cycle-layer'
 import { findingsOf } from './findings'
 import { part } from './part'
 import { curvePowerKw, deadCylindersPart, powerPart } from './power-parts'
 import { propellerPart, runUpPart } from './propeller-parts'
 import { proofPart } from './proof-part'
+import { climbPart } from './climb-part'
+import { coilsPart } from './coils-part'
+import { redundancyPart } from './redundancy-part'
+import { stackPart } from './stack-part'
 import { leadsPart, registerPart } from './register-part'
 import type { CurvePoint, PartError, PerChannel, ScenarioParts, ScenarioResult } from './result-types'
 import { readyScenario } from './ready-scenario'
@@ -21,7 +26,13 @@ const curveAgreement = 0.02
 const publishedCurvature = [1.8e-4, 4e-4] as const
 
 /**
- * The closed-form evaluation of a whole scenario: every part, the findings ranked, their counts, and what to know beside them.
+ * A whole scenario in both layers: the closed forms and the simulated cycle. As `evaluateClosedForms`, with `addCycleLayer` on top.
+ */
+export const evaluateScenario = (scenario: Scenario, limits: Limits = defaultLimits): ScenarioResult =>
+  addCycleLayer(scenario, evaluateClosedForms(scenario, limits), limits)
+
+/**
+ * The closed-form layer of a scenario, quick enough for every keystroke: every part but the cycle's, the findings ranked, their counts, and what to know beside them.
  * Never throws for a part: what cannot be computed stands as `{ ok: false, error }` and the others go on.
  *
  * @param scenario engine and sheet, checked by their schemas (angles in crank degrees, rpm, mm, kW, kPa)
@@ -29,7 +40,7 @@ const publishedCurvature = [1.8e-4, 4e-4] as const
  * @throws nothing for anything a schema lets through; a programming error is not caught
  * Source: the equations of the functions it composes; limits from their own table.
  */
-export function evaluateScenario(scenario: Scenario, limits: Limits = defaultLimits): ScenarioResult {
+export function evaluateClosedForms(scenario: Scenario, limits: Limits = defaultLimits): ScenarioResult {
   const { engine, sheet } = scenario
   const ready = readyScenario(scenario)
   const curves = part(() => advanceCurves(scenario))
@@ -58,6 +69,11 @@ export function evaluateScenario(scenario: Scenario, limits: Limits = defaultLim
     leads: part(() => leadsPart(scenario)),
     proof: part(() => proofPart(ready)),
     marks: part(() => ({ mmPerDeg: arcMm(engine.damperDiameterMm, 1) })),
+    coils: part(() => coilsPart(scenario)),
+    climb: part(() => climbPart(ready)),
+    redundancy: part(() => redundancyPart(scenario)),
+    stack: part(() => stackPart(scenario)),
+    ...cycleNotComputed,
   }
   const findings = findingsOf(ready, parts, limits)
   const count = (verdict: string) => findings.filter((finding) => finding.verdict === verdict).length

@@ -1,24 +1,14 @@
 import { staggerReport } from '../advance/stagger-report'
-import { judge, type LimitId, type Limits, type Verdict } from '../limits'
+import type { Limits } from '../limits'
+import { rankFindings, toFindings, type Draft } from './draft'
 import type { ChannelName, CurvePoint, Finding, PerChannel, ScenarioParts } from './result-types'
 import type { ReadyScenario } from './ready-scenario'
 import type { Scenario } from './scenario-types'
+import { closedDrafts } from './closed-findings'
 import { channelNames, dependsOnPressure } from './speed-points'
 
 /** Speeds looked at between slowest and fastest cranking, rpm apart. */
 const crankingStepRpm = 5
-
-interface Draft {
-  limitId: LimitId
-  channel: ChannelName | null
-  value: number | null
-  /** Replaces the limit's own value where it is relative (idle speed + the allowed excess). */
-  limit?: number
-  data: Finding['data']
-  inputs: string[]
-  sourceIds: string[]
-  method: string
-}
 
 const scheduleInputs = (channel: ChannelName) => [`sheet.${channel}.schedule`, `sheet.${channel}.latencyUs`]
 
@@ -29,7 +19,7 @@ function pressuresOf({ sheet }: Scenario): number[] {
 }
 
 /** Greatest advance while the starter turns: slow cranking of a weak battery to the fastest, before and after a first fire. */
-function crankingDraft(scenario: ReadyScenario, channel: ChannelName): Draft {
+function crankingDraft(scenario: ReadyScenario, channel: ChannelName, stackDeg: number | null): Draft {
   const { crankingSlowestRpm, crankingFastestRpm } = scenario.engine
   const steps = Math.ceil((crankingFastestRpm - crankingSlowestRpm) / crankingStepRpm)
   let worst = { rpm: crankingSlowestRpm, deg: -Infinity, released: false }
@@ -40,7 +30,7 @@ function crankingDraft(scenario: ReadyScenario, channel: ChannelName): Draft {
   }
   return {
     limitId: 'crankingAdvanceDeg', channel, value: worst.deg,
-    data: { rpm: worst.rpm, released: worst.released, slowestRpm: crankingSlowestRpm, fastestRpm: crankingFastestRpm },
+    data: { stackDeg, rpm: worst.rpm, released: worst.released, slowestRpm: crankingSlowestRpm, fastestRpm: crankingFastestRpm },
     inputs: [...scheduleInputs(channel), `sheet.${channel}.crankRetard.byDeg`, 'engine.crankingSlowestRpm', 'engine.crankingFastestRpm'],
     sourceIds: ['trade'], method: 'spark-advance',
   }
@@ -65,25 +55,25 @@ function retardDrafts({ engine, sheet }: Scenario, channel: ChannelName): Draft[
 }
 
 /** Most advance beyond best torque from idle up, at full throttle and without retard. */
-function beyondMbtDraft({ sheet }: Scenario, channel: ChannelName, curve: CurvePoint[], idleRpm: number): Draft {
+function beyondMbtDraft({ sheet }: Scenario, channel: ChannelName, curve: CurvePoint[], idleRpm: number, stackDeg: number | null): Draft {
   let worst = curve.at(-1) ?? { rpm: idleRpm, deg: -Infinity }
   for (const point of curve) if (point.rpm >= idleRpm && point.deg > worst.deg + 1e-12) worst = point
   return {
     limitId: 'beyondMbtDeg', channel, value: worst.deg - sheet.mbt.deg,
-    data: { rpm: worst.rpm, deg: worst.deg, mbtDeg: sheet.mbt.deg, provenance: sheet.mbt.provenance },
+    data: { stackDeg, rpm: worst.rpm, deg: worst.deg, mbtDeg: sheet.mbt.deg, provenance: sheet.mbt.provenance },
     inputs: [...scheduleInputs(channel), 'sheet.mbt.deg'], sourceIds: ['heywood-1988', 'crossley-cook-1991'], method: 'timing-torque',
   }
 }
 
 /** Smallest stagger over cranking to full power, both ways of the hysteresis, at every pressure that matters. */
-function backupFirstDraft(scenario: ReadyScenario): Draft {
+function backupFirstDraft(scenario: ReadyScenario, stackDeg: number | null): Draft {
   const { engine, sheet } = scenario
   const reports = pressuresOf(scenario).flatMap((mapKpa) => (['rising', 'falling'] as const).map((trend) => staggerReport(sheet.primary, sheet.backup, {
     crankingRpm: engine.crankingSlowestRpm, idleRpm: engine.idleRpm, maxRpm: engine.maxRpm, mapKpa, trend,
   }).smallest))
   const smallest = reports.reduce((least, point) => (point.staggerDeg < least.staggerDeg - 1e-12 ? point : least))
   return {
-    limitId: 'backupFirstDeg', channel: null, value: smallest.staggerDeg, data: { rpm: smallest.rpm, staggerMs: smallest.staggerMs },
+    limitId: 'backupFirstDeg', channel: null, value: smallest.staggerDeg, data: { stackDeg, rpm: smallest.rpm, staggerMs: smallest.staggerMs },
     inputs: ['sheet.primary.schedule', 'sheet.backup.schedule'], sourceIds: ['trade'], method: 'stagger',
   }
 }
@@ -103,14 +93,15 @@ function drafts(scenario: ReadyScenario, parts: ScenarioParts, limits: Limits): 
   const { engine, sheet } = scenario
   const { curves, power, register, leads, proof, marks } = parts
   const list: Draft[] = []
+  const stackDeg = parts.stack.ok ? parts.stack.expandedDeg : null
   const add = (compute: () => Draft | Draft[]) => list.push(...[compute()].flat())
   for (const channel of channelNames) {
     if (!curves.ok) continue
-    add(() => beyondMbtDraft(scenario, channel, curves.falling[channel] ?? curves.rising[channel], engine.idleSlowestRpm))
-    add(() => crankingDraft(scenario, channel))
+    add(() => beyondMbtDraft(scenario, channel, curves.falling[channel] ?? curves.rising[channel], engine.idleSlowestRpm, stackDeg))
+    add(() => crankingDraft(scenario, channel, stackDeg))
     add(() => retardDrafts(scenario, channel))
   }
-  if (curves.ok && parts.stagger.ok) add(() => backupFirstDraft(scenario))
+  if (curves.ok && parts.stagger.ok) add(() => backupFirstDraft(scenario, parts.stack.ok ? parts.stack.staggerExpandedDeg : null))
   if (power.ok) add(() => ({
     limitId: 'backupPowerRatio', channel: 'backup', value: power.backupToPrimary,
     data: { rpm: engine.maxRpm, primaryKw: power.atMax.primaryKw, backupKw: power.atMax.backupKw, shortOfMbtDeg: power.shortOfMbtDeg.backup },
@@ -128,6 +119,7 @@ function drafts(scenario: ReadyScenario, parts: ScenarioParts, limits: Limits): 
     data: { expected: leads.expected.join(' '), actual: leads.actual.join(' '), rotation: engine.distributorRotation },
     inputs: ['engine.capTerminals', 'engine.firingOrder', 'engine.distributorRotation'], sourceIds: ['trade'], method: 'firing-schedule',
   }))
+  list.push(...closedDrafts(scenario, parts))
   if (marks.ok) add(() => ({
     limitId: 'markSpacingMm', channel: null, value: marks.mmPerDeg, data: { diameterMm: engine.damperDiameterMm },
     inputs: ['engine.damperDiameterMm'], sourceIds: ['timing-arithmetic'], method: 'arc',
@@ -135,24 +127,6 @@ function drafts(scenario: ReadyScenario, parts: ScenarioParts, limits: Limits): 
   return list
 }
 
-const rank: Record<Verdict, number> = { outside: 0, close: 1, within: 2 }
-
-/** How far inside its limit, in close bands (or in units where there is no band): the less, the worse. */
-const roomOf = ({ value, limit, sense, closeBand }: Finding) =>
-  value === null ? -Infinity : (sense === 'atMost' ? limit - value : value - limit) / (closeBand || 1)
-
-/** Outside, close, within; the least room first in each. */
-export const rankFindings = (findings: readonly Finding[]): Finding[] =>
-  [...findings].sort((left, right) => rank[left.verdict] - rank[right.verdict] || roomOf(left) - roomOf(right) || left.id.localeCompare(right.id))
-
-export function findingsOf(scenario: ReadyScenario, parts: ScenarioParts, limits: Limits): Finding[] {
-  return rankFindings(drafts(scenario, parts, limits).map(({ limit: relative, ...draft }): Finding => {
-    const { sense, value, closeBand, unit } = limits[draft.limitId]
-    const limit = relative ?? value
-    return {
-      ...draft, limit, sense, closeBand, unit,
-      id: draft.channel ? `${draft.limitId}.${draft.channel}` : draft.limitId,
-      verdict: judge(draft.value, { sense, value: limit, closeBand }),
-    }
-  }))
-}
+/** Findings that the closed forms give, ranked. */
+export const findingsOf = (scenario: ReadyScenario, parts: ScenarioParts, limits: Limits): Finding[] =>
+  rankFindings(toFindings(drafts(scenario, parts, limits), limits))

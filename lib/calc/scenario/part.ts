@@ -17,7 +17,25 @@ const sheetMembers: Record<string, string> = {
   phasedAtDeg: 'sheet.rotor.phasedAtDeg',
   mapKpa: 'sheet.manifold.fullKpa',
   diameterMm: 'engine.damperDiameterMm',
+  'engine.ivcDeg': 'sheet.cycle.ivcDeg',
+  'engine.evoDeg': 'sheet.cycle.evoDeg',
+  'charge.temperatureK': 'sheet.cycle.chargeK',
+  'charge.residualFraction': 'sheet.cycle.residualFraction',
+  'charge.airFuelRatio': 'sheet.cycle.airFuelRatio',
+  airFuelRatio: 'sheet.cycle.airFuelRatio',
+  'heatLoss.wallK': 'sheet.cycle.wallK',
+  'heatLoss.headAreaFactor': 'sheet.cycle.headAreaFactor',
+  delayShare: 'sheet.cycle.delayShare',
+  burn: 'sheet.mbt.deg',
+  octane: 'sheet.fuel.octane',
+  gapMm: 'sheet.plugGapMm',
+  temperatureK: 'sheet.conditions.temperatureK',
+  pressureAltitudeM: 'sheet.conditions.pressureAltitudeM',
+  minSpeedMps: 'sheet.airframe.minSpeedMps',
 }
+
+/** Members of the coil's functions that stand on a channel's coil. */
+const coilMembers = new Set(['coil', 'dwellMs', 'ms', 'ambientK', 'thermalResistanceKPerW', 'secondaryPf', 'transferEfficiency', 'clampKv', 'energyMj'])
 
 /** Where in a scenario the argument of a library function came from. */
 function scenarioField(field: string, channel: ChannelName | null): string {
@@ -25,8 +43,9 @@ function scenarioField(field: string, channel: ChannelName | null): string {
   const tail = rest.length > 0 ? `.${rest.join('.')}` : ''
   if (head === 'channel') return `sheet.${channel ?? 'primary'}${tail}`
   if (head === 'primary' || head === 'backup') return `sheet.${head}${tail}`
+  if (coilMembers.has(head)) return `sheet.coils.${channel ?? 'primary'}.${head === 'coil' && tail ? tail.slice(1) : head === 'ms' || head === 'energyMj' ? 'dwellMs' : head}`
   if (engineMembers.has(head)) return `engine.${field}`
-  return sheetMembers[head] ?? field
+  return sheetMembers[field] ?? sheetMembers[head] ?? field
 }
 
 /** A reason to withhold a part that is no fault of what was typed. */

@@ -11,7 +11,7 @@ import { withheld } from './part'
 import { curvePowerKw, displacementCc, frictionPowerAt, fullThrottleCurve, refuseTwoPlugs, timingRatioOf } from './power-parts'
 import type { ChannelName, PropellerPoint, PropellerRow, RunUpExpectation } from './result-types'
 import type { ReadyScenario } from './ready-scenario'
-import type { Pitch } from './scenario-types'
+import type { Pitch, Scenario } from './scenario-types'
 import { perChannel } from './speed-points'
 
 /** Exponents of engine torque against speed at fixed throttle: the expected one and both ends of the band. */
@@ -82,15 +82,7 @@ export function propellerPart(scenario: ReadyScenario): { rows: PropellerRow[] }
     return Math.max(0, left.fraction)
   }
   const { kind, governedRpm, pitches } = sheet.propeller
-  const loads = pitches.map((pitch) => ({ rpm: pitch.rpm, kw: pitch.kw, densityRatio: 1 }))
-  const operatingPoint = (index: number, fraction: (rpm: number) => number): PropellerPoint | null => orNone(() => {
-    const load = loads[index]
-    if (!load) return null
-    if (kind === 'fixedPitch' || governedRpm === null)
-      return { ...fixedPitchOperatingPoint({ powerCurve: points, fraction, load, densityRatio: 1 }), governed: null }
-    const high = loads[index + 1]
-    return constantSpeedOperatingPoint({ powerCurve: points, fraction, densityRatio: 1, governedRpm, lowPitchLoad: load, ...(high ? { highPitchLoad: high } : {}) })
-  })
+  const operatingPoint = (index: number, fraction: (rpm: number) => number) => propellerPointOf(scenario, index, fraction, 1)
   const settings = kind === 'constantSpeed' && governedRpm !== null ? pitches.slice(0, 1) : pitches
   return {
     rows: settings.map((pitch, i) => ({
@@ -100,6 +92,23 @@ export function propellerPart(scenario: ReadyScenario): { rows: PropellerRow[] }
       oneCold: operatingPoint(i, oneCold),
     })),
   }
+}
+
+/** Where a share of the full-throttle power (by speed, its lapse included) meets one pitch at a density ratio; null where it never does. */
+export function propellerPointOf({ engine, sheet }: Scenario, pitchIndex: number, fraction: (rpm: number) => number, densityRatio: number): PropellerPoint | null {
+  const { kind, governedRpm, pitches } = sheet.propeller
+  const loadAt = (index: number) => {
+    const pitch = pitches[index]
+    return pitch && { rpm: pitch.rpm, kw: pitch.kw, densityRatio: 1 }
+  }
+  const powerCurve = fullThrottleCurve(engine).points
+  return orNone(() => {
+    const load = loadAt(pitchIndex)
+    if (!load) return null
+    if (kind === 'fixedPitch' || governedRpm === null) return { ...fixedPitchOperatingPoint({ powerCurve, fraction, load, densityRatio }), governed: null }
+    const high = loadAt(pitchIndex + 1)
+    return constantSpeedOperatingPoint({ powerCurve, fraction, densityRatio, governedRpm, lowPitchLoad: load, ...(high ? { highPitchLoad: high } : {}) })
+  })
 }
 
 /** An engine that never meets this propeller on its curve is a result, not a fault of the input. */

@@ -62,6 +62,109 @@ export interface Rotor {
   plateRadiusMm: number | null
 }
 
+/** Half widths of what may be off, crank degrees; scatter is a standard deviation. */
+export interface Tolerances {
+  timingCheckDeg: number
+  benchDeg: number
+  /** Reading a mark by light. */
+  markDeg: number
+  /** From spark to spark and cylinder to cylinder, one standard deviation. */
+  scatterDeg: number
+}
+
+/** The closed cycle at full throttle, as the model of pressure and detonation sees it. */
+export interface CycleSetup {
+  /** Inlet valve closes, exhaust valve opens: crank degrees from firing top dead centre. */
+  ivcDeg: number
+  evoDeg: number
+  /** Charge at inlet closing. */
+  chargeK: number
+  residualFraction: number
+  airFuelRatio: number
+  /** Mass of air over what the displacement holds in standard air; null: the charge is solved from the power carried. */
+  volumetricEfficiency: number | null
+  /** Share of the burn's total from spark to start of burning. */
+  delayShare: number
+  wallK: number
+  headAreaFactor: number
+}
+
+export type OctaneScale = 'ron' | 'mon' | 'aki' | 'lean'
+
+/** Planned and worse fuel stand on one scale: none is converted. */
+export interface Fuel {
+  scale: OctaneScale
+  octane: number
+  worseOctane: number
+}
+
+export interface WorseCase {
+  /** Hotter charge at inlet closing, K. */
+  hotterK: number
+  /** Denser charge at inlet closing: a field below the planned one, or a day of high pressure. */
+  denserKpa: number
+}
+
+/** Full throttle, at the planned charge. */
+export interface ReferenceSetting {
+  sparkDeg: number
+  rpm: number
+  octane: number
+  /** Crank degrees it is known to be short of detonation; 0 when nothing better is known. */
+  marginDeg: number
+}
+
+/** Coil, its drive and what hangs on it; one a channel. */
+export interface CoilSetup {
+  ohm: number
+  mh: number
+  /** null: not limited. */
+  limitA: number | null
+  dwellMs: number
+  /** At the coil, running and while the starter turns. */
+  supplyV: number
+  crankingV: number
+  /** Two cylinders at a time, one of them for nothing. */
+  wastedSpark: boolean
+  ambientK: number
+  thermalResistanceKPerW: number
+  secondaryPf: number
+  /** Share of the stored energy that reaches the plug. */
+  transferEfficiency: number
+  /** Most voltage the drive lets through; null: not limited. */
+  clampKv: number | null
+}
+
+export interface Airframe {
+  massKg: number
+  wingAreaM2: number
+  cd0: number
+  inducedK: number
+  propEfficiency: number
+  /** Slowest speed to climb at, 1.3 times the stall. */
+  minSpeedMps: number
+}
+
+/** Parts a spark goes through, in the order of the chain; `plug` stands for the lead and plug of one cylinder. */
+export const redundancyParts = ['supply', 'switch', 'trigger', 'module', 'coil', 'cap', 'plug'] as const
+export type RedundancyPart = (typeof redundancyParts)[number]
+
+export interface RedundancySetup {
+  /** Failures an hour at the reference temperature of each kind of part; guesses unless a source is known. */
+  ratesPerH: Record<RedundancyPart, number>
+  /** Temperature at trigger, module and coil, which heat shortens; reference and activation energy of the rates. */
+  hotK: number
+  referenceK: number
+  activationEv: number
+  /** Battery and switch serve both channels. */
+  sharedSupply: boolean
+  /** Both channels fire one coil. */
+  sharedCoil: boolean
+  flightHours: number
+  /** Hours between checks that exercise the backup alone. */
+  checkIntervalHours: number
+}
+
 /** The working sheet: what a designer lays out on top of an engine. */
 export interface ScenarioSheet {
   distribution: 'sharedCap' | 'capEach' | 'directCoils'
@@ -76,7 +179,19 @@ export interface ScenarioSheet {
   /** Manifold pressure at the three conditions; matters where a schedule depends on it. */
   manifold: { idleKpa: number; runUpKpa: number; fullKpa: number }
   rotor: Rotor
-  tolerances: { timingCheckDeg: number; benchDeg: number }
+  tolerances: Tolerances
+  cycle: CycleSetup
+  fuel: Fuel
+  /** Worse than planned: what detonation is judged at. */
+  worse: WorseCase
+  /** A setting known to run clean on this engine, which anchors the detonation model; null: none. */
+  reference: ReferenceSetting | null
+  coils: { primary: CoilSetup; backup: CoilSetup }
+  plugGapMm: number
+  airframe: Airframe
+  /** Where it is to fly: pressure altitude and air temperature. */
+  conditions: { pressureAltitudeM: number; temperatureK: number }
+  redundancy: RedundancySetup
   notes: string
 }
 
