@@ -1,11 +1,12 @@
 import type { ScenarioSheet } from '@/lib/calc/scenario/scenario-types'
+import { clubSix, largeEight, smallFour } from './demo-models'
 
 /** Sheets of the demo scenarios, on the engines of demo-engines. Figures as a shop might have them, invented all the same. */
 
-const bench = { timingCheckDeg: 1, benchDeg: 0.5 }
 const retard = { byDeg: 8, belowRpm: 450, hysteresisRpm: 40 }
 
 const common = {
+  ...clubSix,
   distribution: 'sharedCap', plugsPerCylinder: 1, selection: 'oneAtATime',
   mbt: { deg: 31.5, curvaturePerDeg2: 3.2e-4, provenance: 'measured', note: 'Spring balance on the club propeller, five angles, two afternoons.' },
   propeller: { kind: 'fixedPitch', governedRpm: null, pitches: [{ name: 'climb', rpm: 2780, kw: 50 }, { name: 'ground-set, half a degree coarser', rpm: 2690, kw: 48.2 }] },
@@ -14,7 +15,6 @@ const common = {
   rotor: {
     terminalWidthDeg: 7, rotorWidthDeg: 16, phasedAtDeg: 13, backupPhasedAtDeg: 9, sparkDurationMs: 1.2, mechanicalCarriesRotor: true, plateRadiusMm: 36,
   },
-  tolerances: bench,
 } as const satisfies Partial<ScenarioSheet>
 
 const pitches = (list: ScenarioSheet['propeller']['pitches']): ScenarioSheet['propeller'] => ({ kind: 'fixedPitch', governedRpm: null, pitches: list })
@@ -98,6 +98,7 @@ export const reasonForProof = 'Full timing is read on the bench at 2780 rpm for 
 
 export const fourCapEach: ScenarioSheet = {
   ...common,
+  ...smallFour,
   distribution: 'capEach',
   primary: { schedule: { kind: 'fixed', deg: 24 }, crankRetard: { byDeg: 7, belowRpm: 500, hysteresisRpm: 50 }, latencyUs: 60 },
   backup: { schedule: { kind: 'fixed', deg: 15 }, latencyUs: 0 },
@@ -110,6 +111,7 @@ export const fourCapEach: ScenarioSheet = {
 
 export const eightDirect: ScenarioSheet = {
   ...common,
+  ...largeEight,
   distribution: 'directCoils',
   primary: {
     schedule: { kind: 'table', points: [{ rpm: 400, deg: 20 }, { rpm: 640, deg: 24 }, { rpm: 3200, deg: 24.5 }] },

@@ -1,5 +1,5 @@
 import type { Actor } from '@/lib/auth/actor'
-import type { Engine, ScenarioSheet } from '@/lib/calc/scenario/scenario-types'
+import type { CoilSetup, Engine, ScenarioSheet } from '@/lib/calc/scenario/scenario-types'
 import { createEngine } from '@/lib/data/engines/create-engine'
 import { createScenario } from '@/lib/data/scenarios/create-scenario'
 import type { EngineDto } from '@/lib/schemas/engine-dto'
@@ -22,6 +22,11 @@ export const engineSpec: Engine = {
   distributorRotation: 'anticlockwise', capTerminals: [1, 6, 3, 2, 5, 4],
 }
 
+const aCoil: CoilSetup = {
+  ohm: 0.8, mh: 5, limitA: 7, dwellMs: 3.4, supplyV: 13.8, crankingV: 9, wastedSpark: false,
+  ambientK: 330, thermalResistanceKPerW: 4, secondaryPf: 90, transferEfficiency: 0.5, clampKv: null,
+}
+
 /** Everything within its limits, but for what a test changes. */
 export const sheet = (change: Partial<ScenarioSheet> = {}): ScenarioSheet => ({
   distribution: 'sharedCap', plugsPerCylinder: 1, selection: 'oneAtATime',
@@ -32,7 +37,22 @@ export const sheet = (change: Partial<ScenarioSheet> = {}): ScenarioSheet => ({
   runUpRpm: 1700,
   manifold: { idleKpa: 38, runUpKpa: 62, fullKpa: 97 },
   rotor: { terminalWidthDeg: 6, rotorWidthDeg: 14, phasedAtDeg: 12, backupPhasedAtDeg: 12, sparkDurationMs: 1.2, mechanicalCarriesRotor: true, plateRadiusMm: 36 },
-  tolerances: { timingCheckDeg: 1, benchDeg: 0.5 },
+  tolerances: { timingCheckDeg: 1, benchDeg: 0.5, markDeg: 0.4, scatterDeg: 0.25 },
+  cycle: {
+    ivcDeg: -120, evoDeg: 118, chargeK: 365, residualFraction: 0.05, airFuelRatio: 12.6, volumetricEfficiency: null,
+    delayShare: 0.12, wallK: 460, headAreaFactor: 1.2,
+  },
+  fuel: { scale: 'ron', octane: 98, worseOctane: 96 },
+  worse: { hotterK: 10, denserKpa: 2 },
+  reference: { sparkDeg: 27, rpm: 2780, octane: 96, marginDeg: 5 },
+  coils: { primary: aCoil, backup: aCoil },
+  plugGapMm: 0.6,
+  airframe: { massKg: 430, wingAreaM2: 12, cd0: 0.03, inducedK: 0.05, propEfficiency: 0.7, minSpeedMps: 28 },
+  conditions: { pressureAltitudeM: 200, temperatureK: 290 },
+  redundancy: {
+    ratesPerH: { supply: 2e-6, switch: 1e-6, trigger: 1e-5, module: 2e-5, coil: 2e-5, cap: 2e-6, plug: 1e-5 },
+    hotK: 350, referenceK: 330, activationEv: 0.4, sharedSupply: true, sharedCoil: false, flightHours: 1, checkIntervalHours: 10,
+  },
   notes: '',
   ...change,
 })
