@@ -3,7 +3,6 @@ import { meanOf, squaresAbout } from '../shared/moments'
 import { takeNumbers } from '../validate/numbers'
 import { finiteResult } from '../validate/result'
 import { membersOf, takeList } from '../validate/shape'
-import { startMinusProducts } from './exact-sum'
 import { factorise, inverseRowLengths } from './householder'
 
 export interface LeastSquaresInput {
@@ -61,7 +60,7 @@ const scaleOf = (list: readonly number[]): number => {
  * Least squares of values against columns: `{ coefficients, standardErrors, residualSd, rSquared, fStatistic }`; residualSd in the unit of the values,
  * coefficients and standardErrors in that unit over the column's, rSquared and fStatistic without unit.
  *
- * value ≈ Σ coefficient·column, by Householder reflections with scaled and pivoted columns and one refinement with residuals in twice the digits;
+ * value ≈ Σ coefficient·column, by Householder reflections with scaled and pivoted columns;
  * residualSd = √(SSE/(n − p)); standardErrors = residualSd·√diag((XᵀX)⁻¹); rSquared = 1 − SSE/SST; fStatistic = ((SST − SSE)/q)/residualSd².
  * With a constant column SST is taken about the mean and q = p − 1, without one about 0 and q = p.
  *
@@ -88,17 +87,16 @@ export const leastSquares = (input: LeastSquaresInput): LeastSquares => {
   const factors = factorise(scales.map((_, j) => scaledRows.map((row) => row[j] ?? 0)), leastShare)
   if (factors === null) throw new CalcError({ field: 'rows', value: members.rows, limit: 'columns that do not depend on each other', unit: '', message: 'One of the columns follows from the others, so its coefficient has no single value: leave it out.' })
 
-  const residualsOf = (solution: readonly number[]): number[] => scaledRows.map((row, i) => startMinusProducts(side[i] ?? 0, row, solution))
-  let solution = factors.solve(side)
-  for (let pass = 0; pass < 2; pass += 1) {
-    const step = factors.solve(residualsOf(solution))
-    solution = solution.map((entry, j) => entry + (step[j] ?? 0))
-  }
-  const sse = residualsOf(solution).reduce((sum, residual) => sum + residual * residual, 0)
+  const solution = factors.solve(side)
+  let sse = 0
+  scaledRows.forEach((row, i) => {
+    const fitted = row.reduce((sum, entry, j) => sum + entry * (solution[j] ?? 0), 0)
+    sse += ((side[i] ?? 0) - fitted) ** 2
+  })
   const spread = Math.sqrt(sse / (count - width))
 
   const hasConstant = columns.some((column) => column[0] !== 0 && column.every((entry) => entry === column[0]))
-  const { largest, shares } = squaresAbout(side, hasConstant ? meanOf(side) : 0)
+  const { largest, shares } = squaresAbout(side, meanOf(side))
   const whole = side.reduce((sum, entry) => sum + entry * entry, 0)
   const sst = hasConstant ? largest * largest * shares : whole
   const explaining = hasConstant ? width - 1 : width

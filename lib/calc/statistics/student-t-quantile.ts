@@ -4,8 +4,8 @@ import { betaFraction, logHalfStepOfGamma } from './incomplete-beta'
 import { normalUpperQuantile } from './normal-quantile'
 import { degreesOfFreedom, probabilityRule } from './rules'
 
-/** From here on Hill's expansion is exact to rounding down to the smallest tail a number can hold. */
-const manyDegrees = 2e4
+/** From here on two terms of Hill's expansion are exact to rounding, down to the smallest tail a number can hold. */
+const manyDegrees = 1e5
 /** Beyond this the distribution cannot be told from the normal one. */
 const endlessDegrees = 1e18
 /** Logarithms of the smallest and the largest number. */
@@ -66,8 +66,7 @@ const fromNormal = (z: number, dof: number): number => {
   const b = 48 * a * a
   let w = z
   for (let i = 0; i < 6; i += 1) {
-    const y = w * w
-    w = z / (1 + (y + 3 - (((0.4 * y + 3.3) * y + 24) * y + 85.5) / (0.8 * y * y + 100 + b)) / b)
+    w = z / (1 + (w * w + 3) / b)
   }
   return Math.sqrt(dof * Math.expm1((w * w) / a))
 }
@@ -83,7 +82,7 @@ export const studentTUpperQuantile = (tail: number, dof: number): number => {
  * Value of Student's t distribution that is not exceeded with the given probability, without unit.
  *
  * t with 1 − ½·I_x(ν/2, ½) = probability, x = ν/(ν + t²) (I: regularised incomplete beta function), for t ≥ 0 and by symmetry below;
- * from 20 000 degrees of freedom by Hill's expansion about the normal value.
+ * from 100 000 degrees of freedom by Hill's expansion about the normal value.
  *
  * Validity: 1e-12 relative; ν need not be whole.
  * Source: hill-1970, expansion for many degrees of freedom (memory)

@@ -20,7 +20,7 @@ export const statistics = defineTopic({
     },
     {
       id: 'least-squares', title: 'Least squares of several columns', tex: String.raw`\min_{b} \sum_i \left(y_i - \sum_j x_{ij}\, b_j\right)^2, \qquad s = \sqrt{\frac{1}{N - p} \sum_i \left(y_i - \sum_j x_{ij}\, b_j\right)^2}`,
-      note: 'By reflections, never by the normal equations, and refined once with residuals in twice the digits. Columns that follow from each other are refused.',
+      note: 'By reflections, never by the normal equations. Columns that follow from each other are refused.',
       symbols: [
         { tex: 'y_i', meaning: 'values', unit: 'that of the values' },
         { tex: 'x_{ij}', meaning: 'columns; a constant term is a column of ones', unit: 'that of the column' },

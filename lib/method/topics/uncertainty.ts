@@ -31,7 +31,7 @@ export const uncertainty = defineTopic({
     },
     {
       id: 'student-t', title: 'Student t', tex: String.raw`P = 1 - \tfrac{1}{2}\, I_x\left(\tfrac{\nu}{2}, \tfrac{1}{2}\right), \qquad x = \frac{\nu}{\nu + t^2}`,
-      note: 'Solved for t. From 20 000 degrees of freedom an expansion about the normal value takes over; without end it is the normal value.',
+      note: 'Solved for t. From 100 000 degrees of freedom an expansion about the normal value takes over; without end it is the normal value.',
       symbols: [
         { tex: 't', meaning: 'value that is not exceeded with the chance P', unit: 'no unit' },
         { tex: 'P', meaning: 'chance; one half plus half the coverage for a band to both sides', unit: 'no unit', range: 'between 0 and 1' },
