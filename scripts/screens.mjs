@@ -20,7 +20,7 @@ const database = cluster('pg-test', console.log)
 const name = `screens_${process.pid}`
 
 /** Name of a picture → address; `{scenario}` and the like are filled in from the demo. */
-const publicPages = { landing: '/', 'sign-in': '/sign-in', 'sign-up': '/sign-up' }
+const publicPages = { landing: '/', method: '/method', 'sign-in': '/sign-in', 'sign-up': '/sign-up' }
 const shopPages = {
   scenarios: '/scenarios', 'scenarios-none-found': '/scenarios?search=nothing+like+this', 'scenario-new': '/scenarios/new',
   sheet: '/scenarios/{scenario}', revisions: '/scenarios/{scenario}/revisions', revision: '/scenarios/{scenario}/revisions/1',

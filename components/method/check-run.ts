@@ -6,9 +6,9 @@ export interface CheckCounts { computed: number, within: number, outside: number
 type Library = Readonly<Record<string, unknown>>
 
 /** A slice of work short enough that a key pressed meanwhile is not felt to wait, ms. */
-const sliceMs = 8
+const sliceMs = 12
 
-const whenIdle = (work: () => void) => (typeof requestIdleCallback === 'function' ? requestIdleCallback(work, { timeout: 200 }) : setTimeout(work, 1))
+const whenIdle = (work: () => void) => (typeof requestIdleCallback === 'function' ? requestIdleCallback(work, { timeout: 50 }) : setTimeout(work, 1))
 
 /** The library as the browser first gets it, with the formula parser only where a check needs it. */
 async function loadLibrary(needsFormula: boolean): Promise<Library> {

@@ -22,7 +22,7 @@ export function CheckSummary({ total, known }: { total: number, known: string })
           : <>{computed > 0 ? `${counts}, computed in this browser. ` : 'Computed in this browser as soon as the page is there. '}{known}</>}
       </Stamp>
       <p className="sr" role="status">{isDone ? `${counts}.` : ''}</p>
-      <noscript><p className="note">The computed column needs a script. Equations, symbols and the figures of the sources stand without it.</p></noscript>
+      <p className="note scriptless">The computed column needs a script. Equations, symbols and the figures of the sources stand without it.</p>
     </div>
   )
 }

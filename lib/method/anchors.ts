@@ -14,6 +14,12 @@ export const findingEquation: Record<Finding['limitId'], EquationId> = {
   freeDeg: 'rotor-register',
   leadsOutOfPlace: 'firing-schedule',
   markSpacingMm: 'arc',
+  detonationDeg: 'knock-limit',
+  windingK: 'coil-heat',
+  sparkVoltageRatio: 'spark-offered',
+  periodShare: 'sparks-per-second',
+  climbMps: 'climb-rate',
+  noSparkPerH: 'latent-together',
 }
 
 /** The equation behind each part of an evaluation. */
@@ -29,6 +35,14 @@ export const partEquation: Record<PartName, EquationId> = {
   leads: 'firing-schedule',
   proof: 'proof-speed',
   marks: 'arc',
+  coils: 'coil-current',
+  climb: 'climb-rate',
+  redundancy: 'latent-together',
+  stack: 'combined-uncertainty',
+  charge: 'charge',
+  detonation: 'knock-limit',
+  pressure: 'cycle-pressure',
+  spark: 'spark-offered',
 }
 
 export const methodPath = (id: EquationId): string => `/method#${id}`

@@ -17,10 +17,10 @@ function scientific(value: number, digits: number, sign: boolean): string {
   return `${formatNumber(Number(mantissa), mantissa.split('.')[1]?.length ?? 0, sign)}\u00a0×\u00a010${power}`
 }
 
-function figure(value: number, decimals: number, sign = false): string {
+function figure(value: number, decimals: number, sign = false, plain = plainDecimals): string {
   if (value === 0) return '0'
   const size = Math.abs(value)
-  if (size < 1e-3 && decimals > plainDecimals || size >= 1e7) return scientific(value, magnitude(value) + decimals, sign)
+  if (size < 1e-3 && decimals > plain || size >= 1e7) return scientific(value, magnitude(value) + decimals, sign)
   return formatNumber(value, Math.max(0, Math.min(decimals, mostDigits - 1 - magnitude(value))), sign)
 }
 
@@ -47,10 +47,10 @@ function computedDecimals(check: PublishedCheck): number {
 export const expectedText = (check: PublishedCheck): string => figure(check.expected, printedDecimals(check))
 export const computedText = (check: PublishedCheck, value: number): string => figure(value, computedDecimals(check))
 
-/** One digit finer than the computed figure; below that it is rounding, and shown as none. */
+/** One digit finer than the computed figure, and written like it; below that it is rounding, and shown as none. */
 export function differenceText(check: PublishedCheck, difference: number): string {
   const decimals = computedDecimals(check) + 1
-  return Math.abs(difference) < 0.5 * 10 ** -decimals ? '0' : figure(difference, decimals, true)
+  return Math.abs(difference) < 0.5 * 10 ** -decimals ? '0' : figure(difference, decimals, true, plainDecimals + 2)
 }
 
 export function toleranceText({ tolerance }: Pick<PublishedCheck, 'tolerance'>): string {

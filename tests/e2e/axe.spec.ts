@@ -45,8 +45,9 @@ for (const colorScheme of ['light', 'dark'] as const) {
     const context = await browser.newContext({ colorScheme })
     const page = await context.newPage()
     const clean = watch(page)
-    for (const path of ['/', '/sign-in', '/sign-up', '/nowhere']) {
+    for (const path of ['/', '/method', '/sign-in', '/sign-up', '/nowhere']) {
       await page.goto(path)
+      if (path === '/method') await expect(page.getByText(/^All \d+ checks within their tolerance$/)).toBeVisible({ timeout: 30_000 })
       await test.step(path, () => judge(page))
     }
     await page.goto('/sign-in')

@@ -4,6 +4,7 @@ import { describe, expect, it } from 'vitest'
 import * as calc from '@/lib/calc'
 import { displayMath, inlineMath } from '@/lib/method/math'
 import { casesOfTopic } from '@/lib/method/topic-cases'
+import type { Equation } from '@/lib/method/topic'
 import { topics } from '@/lib/method/topics'
 import type { PublishedCase } from '@/tests/published/published-case'
 import { someCases } from '@/tests/support/cases'
@@ -14,7 +15,7 @@ const notExplained = [
   'dependsOnPressure', 'findSpeedPoint', 'speedPointAt', 'storedResult',
 ]
 
-const equations = topics.flatMap((topic) => topic.equations.map((equation) => ({ topic: topic.id, ...equation })))
+const equations: readonly (Equation & { topic: string })[] = topics.flatMap((topic) => topic.equations.map((equation) => ({ topic: topic.id, ...equation })))
 const folder = path.resolve(import.meta.dirname, '../../published/cases')
 const cases: PublishedCase[] = readdirSync(folder).filter((name) => name.endsWith('.json')).map((name) => JSON.parse(readFileSync(path.join(folder, name), 'utf8')))
 
