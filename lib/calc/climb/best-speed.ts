@@ -13,6 +13,7 @@ export interface SpeedSearch {
 interface Peak { readonly speedMps: number, readonly watts: number }
 
 const samples = 240
+const mostRounds = 8
 /** So many of the highest tops that the samples show are climbed to the end. */
 const topsTried = 4
 const goldenShare = (Math.sqrt(5) - 1) / 2
@@ -88,7 +89,8 @@ export const bestSpeed = (search: SpeedSearch): Peak => {
   const peakAt = (speedMps: number): Peak => ({ speedMps, watts: excessW(speedMps) })
   let best = peakAt(startMps)
   let line: Peak[] = []
-  for (let width = Infinity; ;) {
+  let width = Infinity
+  for (let round = 0; round < mostRounds; round += 1) {
     const [low, high] = spanAbove(search, best.watts)
     if (high - low > width / 2) break
     width = high - low

@@ -135,6 +135,13 @@ describe('bestClimb with an efficiency that varies', () => {
     expectClose(best.speedMps, brute.speedMps, { rel: 1e-6 })
   })
 
+  it('looks again, closer, once it has something to beat: a narrow band, with braking elsewhere that makes the first look long', () => {
+    for (let centre = 57; centre < 58.5; centre += 0.1) {
+      const efficiency = (v: number) => (Math.abs(v - 27.4) < 5 ? -80 : Math.max(0, 0.9 * (1 - ((v - centre) / 0.2) ** 2)))
+      expectClose(bestClimb({ ...climbing, propEfficiency: efficiency }).speedMps, centre, { abs: 0.01 })
+    }
+  })
+
   it('names what cannot be used', () => {
     const of = (change: object) => () => bestClimb({ ...climbing, propEfficiency: 0.7, ...change })
     for (const propEfficiency of [() => Number.NaN, () => Infinity, () => 1.01, () => null, () => '0.7', () => -0.5, -0.1, 1.1, undefined, null]) expectCalcError(of({ propEfficiency }), 'propEfficiency')
