@@ -8,15 +8,12 @@ import type { Finding } from '@/lib/calc/live'
 import type { FindingChange, FindingChanges } from '@/lib/compare/finding-changes'
 import { findingEquation } from '@/lib/method/anchors'
 import type { UnitSystem } from '@/lib/units'
-import { findingTitle, findingValue, letterOf, limitWords, verdictWord } from '@/lib/words/findings'
+import { findingAmount, findingTitle, letterOf, limitWords, verdictWord } from '@/lib/words/findings'
 
 const wordOf = (finding: Finding | null) => (finding ? verdictWord[finding.verdict].toLowerCase() : 'not judged')
 
-function valueWords(finding: Finding, system: UnitSystem): string {
-  const value = findingValue(finding, system)
-  const text = value ? `${value.text}${value.joined ? value.unit : value.unit ? ` ${value.unit}` : ''}` : 'no such value'
-  return `${text}, ${limitWords(finding, system)}`
-}
+const valueWords = (finding: Finding, system: UnitSystem) =>
+  `${finding.value === null ? 'no such value' : findingAmount(finding, system)}, ${limitWords(finding, system)}`
 
 function ChangeRow({ change: { was, now }, system }: { change: FindingChange, system: UnitSystem }) {
   const shown = now ?? was

@@ -17,12 +17,13 @@ interface ResultDifferencesProps {
 
 function Side({ side, unit }: { side: ResultSide | null, unit: ResultRow['unit'] }) {
   if (!side) return <span className="fine">withheld</span>
-  const { text, verdict } = side
+  const { text, verdict, spread } = side
   const isNumber = /\d/.test(text)
   return (
     <>
       {verdict === 'outside' || verdict === 'close' ? <VerdictMark verdict={verdict} wordless /> : null}
       {isNumber ? <Num value={text} unit={unit.joined ? '°' : unit.symbol} bad={verdict === 'outside'} /> : <b className={verdict === 'outside' ? 'bad' : undefined}>{text}</b>}
+      {spread ? <small>{spread}</small> : null}
     </>
   )
 }

@@ -9,7 +9,7 @@ import { Section } from '@/components/ui/section'
 import type { Finding } from '@/lib/calc/live'
 import type { ActionState } from '@/lib/errors'
 import type { UnitSystem } from '@/lib/units'
-import { findingLead, findingTitle, findingValue, letterOf, limitWords } from '@/lib/words/findings'
+import { findingAmount, findingLead, findingTitle, letterOf, limitWords } from '@/lib/words/findings'
 
 interface ReleaseFormProps {
   title: string
@@ -19,11 +19,8 @@ interface ReleaseFormProps {
   release: (before: ActionState, form: FormData) => Promise<ActionState>
 }
 
-const labelOf = (finding: Finding, system: UnitSystem) => {
-  const value = findingValue(finding, system)
-  const amount = value ? `${value.text}${value.unit === '°' ? '°' : value.unit ? ` ${value.unit}` : ''}` : 'none'
-  return `${finding.channel ? `${letterOf(finding.channel)}: ` : ''}${findingLead(finding, system)} ${amount}; ${limitWords(finding, system)}`
-}
+const labelOf = (finding: Finding, system: UnitSystem) =>
+  `${finding.channel ? `${letterOf(finding.channel)}: ` : ''}${findingLead(finding, system)} ${findingAmount(finding, system)}; ${limitWords(finding, system)}`
 
 /** A reason in writing for each finding outside its limit, then the release. */
 export function ReleaseForm({ title, backHref, outside, system, release }: ReleaseFormProps) {

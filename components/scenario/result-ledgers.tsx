@@ -1,33 +1,18 @@
 'use client'
 
 import { memo } from 'react'
-import { EquationLink } from '@/components/method/equation-link'
 import { ChannelChip } from '@/components/ui/channel-chip'
 import { Ledger } from '@/components/ui/ledger'
-import { Num } from '@/components/ui/num'
 import { Section } from '@/components/ui/section'
-import type { PartName, Scenario, ScenarioParts } from '@/lib/calc/live'
-import { partEquation } from '@/lib/method/anchors'
-import { partTitle } from '@/lib/words/parts'
-import { formatQuantity, formatQuantityText, type FormatOptions, type QuantityKind, type UnitSystem } from '@/lib/units'
+import { formatQuantity, formatQuantityText, type FormatOptions, type QuantityKind } from '@/lib/units'
+import { ClimbLedger } from './ledgers/climb-ledger'
+import { CoilLedger, SparkLedger } from './ledgers/coil-ledgers'
+import { ChargeLedger, PressureLedger } from './ledgers/cycle-ledgers'
+import { DetonationLedger } from './ledgers/detonation-ledger'
+import { channelHeads, equationOf, Quantity, type LedgersProps } from './ledgers/ledger-parts'
+import { RedundancyLedger } from './ledgers/redundancy-ledger'
+import { StackLedger } from './ledgers/stack-ledger'
 import { PartView } from './stale-part'
-
-interface LedgersProps {
-  parts: ScenarioParts
-  stale: ReadonlySet<PartName>
-  scenario: Scenario
-  system: UnitSystem
-}
-
-const channelHeads = [{ head: '' }, { head: <ChannelChip channel="A" />, right: true }, { head: <ChannelChip channel="B" />, right: true }]
-
-const equationOf = (name: PartName) => <EquationLink id={partEquation[name]} of={partTitle[name]} />
-
-/** A quantity of the library as the person reads it. */
-function Quantity({ value, kind, system, ...options }: { value: number, kind: QuantityKind, system: UnitSystem } & FormatOptions) {
-  const { text, unit } = formatQuantity(value, kind, system, options)
-  return <Num value={text} unit={unit} />
-}
 
 function PowerLedger({ parts, stale, scenario, system }: LedgersProps) {
   const rpm = scenario.engine.maxRpm
@@ -181,10 +166,22 @@ export const ResultLedgers = memo(function ResultLedgers(props: LedgersProps) {
           <RegisterLedger {...props} />
         </div>
       </div>
+      <DetonationLedger {...props} />
+      <div className="leds">
+        <CoilLedger {...props} />
+        <SparkLedger {...props} />
+        <div>
+          <ChargeLedger {...props} />
+          <PressureLedger {...props} />
+        </div>
+      </div>
       <div className="leds wide-2">
         <RunUpLedger {...props} />
         <PropellerLedger {...props} />
+        <ClimbLedger {...props} />
+        <RedundancyLedger {...props} />
       </div>
+      <div className="leds wide-2"><StackLedger {...props} /></div>
     </>
   )
 })

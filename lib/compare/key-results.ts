@@ -1,4 +1,4 @@
-import type { ChannelName, LimitUnit, MarkedSpeed, Part, PartError, PartName, ScenarioResult } from '../calc/live'
+import type { ChannelName, MarkedSpeed, Part, PartError, PartName, ScenarioResult } from '../calc/live'
 import { formatQuantityText, type QuantityKind, type UnitSystem } from '../units'
 
 /** One figure of an evaluation, in base units. */
@@ -75,9 +75,4 @@ export function keyResults(result: Pick<ScenarioResult, 'parts'>, system: UnitSy
     ])),
     group('marks', 'Timing marks', parts.marks, ({ mmPerDeg }) => [{ id: 'marks', label: 'One degree on the damper', channel: null, kind: 'markSpacing', value: mmPerDeg }]),
   ]
-}
-
-/** Which kind of quantity a finding's figures are. */
-export const kindOfLimitUnit: Record<LimitUnit, QuantityKind> = {
-  deg: 'angle', distributorDeg: 'distributorAngle', rpm: 'engineSpeed', ratio: 'ratio', mmPerDeg: 'markSpacing', count: 'count',
 }

@@ -2,8 +2,8 @@ import type { ChannelName, Finding, ScenarioResult, Verdict } from '../calc/live
 import { formatQuantity, unitOf, type QuantityKind, type UnitSystem } from '../units'
 import { findingEquation, partEquation } from '../method/anchors'
 import type { EquationId } from '../method/topics'
-import { findingTitle, findingValue, limitWords } from '../words/findings'
-import { keyResults, kindOfLimitUnit, type KeyResult } from './key-results'
+import { findingSpread, findingTitle, findingValue, kindOfLimitUnit, limitWords, noValueWord } from '../words/findings'
+import { keyResults, type KeyResult } from './key-results'
 
 type Result = Pick<ScenarioResult, 'parts' | 'findings'>
 
@@ -11,6 +11,8 @@ type Result = Pick<ScenarioResult, 'parts' | 'findings'>
 export interface ResultSide {
   text: string
   verdict: Verdict | null
+  /** How far an uncertain figure reaches: it never stands without. */
+  spread?: string | null
 }
 
 export interface ResultRow {
@@ -49,7 +51,7 @@ const unitFor = (kind: QuantityKind, system: UnitSystem) => {
 }
 
 const sideOf = (finding: Finding | undefined, system: UnitSystem): ResultSide | null =>
-  finding ? { text: findingValue(finding, system)?.text ?? 'none', verdict: finding.verdict } : null
+  finding ? { text: findingValue(finding, system)?.text ?? noValueWord(finding), verdict: finding.verdict, spread: findingSpread(finding, system) } : null
 
 const rank: Record<Verdict, number> = { outside: 0, close: 1, within: 2 }
 const worst = (...findings: (Finding | undefined)[]) => Math.min(...findings.map((finding) => (finding ? rank[finding.verdict] : 3)))
