@@ -45,7 +45,7 @@ export const sampleSheet = (change: Partial<ScenarioSheet> = {}): ScenarioSheet 
   airframe: { massKg: 500, wingAreaM2: 11, cd0: 0.032, inducedK: 0.055, propEfficiency: 0.68, minSpeedMps: 32 },
   conditions: { pressureAltitudeM: 300, temperatureK: 293.15 },
   redundancy: {
-    ratesPerH: { supply: 5e-5, switch: 1e-5, trigger: 2e-5, module: 4e-5, coil: 3e-5, cap: 2e-5, plug: 1e-5 },
+    ratesPerH: { supply: 2e-6, switch: 1e-6, trigger: 2e-5, module: 4e-5, coil: 3e-5, cap: 2e-6, plug: 1e-5 },
     hotK: 358, referenceK: 333, activationEv: 0.5, sharedSupply: true, sharedCoil: false, flightHours: 1, checkIntervalHours: 25,
   },
   notes: '',
