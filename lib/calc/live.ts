@@ -95,6 +95,7 @@ export { linearTrend, type LinearTrend, type LinearTrendInput, type TrendPoint, 
 export { processCapability, type CapabilityLimits, type ProcessCapability } from './statistics/process-capability'
 export { cpkInterval, type CpkInterval, type CpkIntervalInput } from './statistics/cpk-interval'
 export { individualsChart, type IndividualsChart } from './statistics/individuals-chart'
+export { controlChartFactors, type ControlChartFactors } from './statistics/control-chart-factors'
 
 export type { BenchPlan, BenchReading, ChannelName } from './bench/bench-types'
 export type { BenchRow, BenchScatter, BenchStagger } from './bench/bench-groups'

@@ -64,7 +64,7 @@ const list: readonly Source[] = [
   { id: 'normal-table', author: 'statistics tables', title: 'Table of the normal distribution', year: null, provenance: 'memory', use: 'Normal values at the usual coverages' },
   { id: 'bissell-1990', author: 'A. F. Bissell', title: 'How reliable is your capability index?, Applied Statistics 39', year: 1990, provenance: 'memory', use: 'Interval of a capability index' },
   { id: 'capability-example', author: 'SAS Institute', title: 'QC user’s guide, example 5.3', year: null, provenance: 'read', use: 'Capability interval of 75 measured amplifications' },
-  { id: 'chart-constants', author: 'quality control handbooks', title: 'Factors of control charts', year: null, provenance: 'read', use: 'd2 and D4 for ranges of two values' },
+  { id: 'chart-constants', author: 'quality control handbooks', title: 'Factors of control charts', year: null, provenance: 'read', use: 'Factors for groups of 2 to 20 values; d2 and D4 of two for a chart of single values' },
   { id: 'nist-handbook', author: 'National Institute of Standards and Technology', title: 'e-Handbook of Statistical Methods, 6.1.6 and 6.3.2.2', year: null, provenance: 'memory', use: 'Chart of ten flow rates; capability of a worked process' },
   { id: 'nist-norris', author: 'National Institute of Standards and Technology', title: 'Statistical Reference Datasets, Norris', year: null, provenance: 'read', use: 'Certified values of a least-squares line' },
   { id: 'nist-longley', author: 'National Institute of Standards and Technology', title: 'Statistical Reference Datasets, Longley', year: null, provenance: 'read', use: 'Certified values of least squares with seven columns that nearly depend on each other' },

@@ -21,7 +21,7 @@ const covered = [
   'coilCurrentA', 'stalledCurrentA', 'dwellForCurrentMs', 'sparkEnergyMj', 'sparksPerSecond', 'dwellAvailableMs', 'sparkPeriodShare', 'coilHeat',
   'breakdownKv', 'sparkDemandKv', 'sparkMargin', 'pistonTravelMm', 'cylinderVolumeCc',
   'eventProbability', 'faultTreeProbability', 'timeAveragedProbability', 'minimalCutSets', 'importance', 'singlePoints', 'rateSensitivity',
-  'normalQuantile', 'studentTQuantile', 'combineUncertainty', 'leastSquares', 'linearTrend', 'processCapability', 'cpkInterval', 'individualsChart',
+  'normalQuantile', 'studentTQuantile', 'combineUncertainty', 'leastSquares', 'linearTrend', 'processCapability', 'cpkInterval', 'individualsChart', 'controlChartFactors',
   'evaluateBenchRun', 'benchReadingsToAdvance', 'evaluateTimingCheck', 'evaluateRunUp',
 ]
 

@@ -4,7 +4,7 @@ export const statistics = defineTopic({
   id: 'statistics',
   title: 'Trend, capability and control',
   intro: 'How timing creeps with engine hours, and how evenly the shop makes its units.',
-  functions: ['linearTrend', 'leastSquares', 'processCapability', 'cpkInterval', 'individualsChart'],
+  functions: ['linearTrend', 'leastSquares', 'processCapability', 'cpkInterval', 'individualsChart', 'controlChartFactors'],
   equations: [
     {
       id: 'trend', title: 'Trend and its band', tex: String.raw`\hat{y}(h) = b_0 + b_1 h \;\pm\; t_\nu\, s \sqrt{1 + \frac{1}{N} + \frac{(h - \bar{h})^2}{\sum (h_i - \bar{h})^2}}`,
@@ -57,6 +57,18 @@ export const statistics = defineTopic({
         { tex: String.raw`\bar{x}`, meaning: 'mean of the values', unit: 'that of the values' },
       ],
       sources: ['nist-handbook'],
+    },
+    {
+      id: 'chart-factors', title: 'Factors for charts of groups', tex: String.raw`d_2 = \int \left(1 - \Phi^N - (1 - \Phi)^N\right) \mathrm{d}x, \qquad c_4 = \sqrt{\frac{2}{N - 1}}\,\frac{\Gamma\left(\tfrac{N}{2}\right)}{\Gamma\left(\tfrac{N - 1}{2}\right)}, \qquad D = 1 \pm \frac{3\, d_3}{d_2}, \qquad B = 1 \pm \frac{3 \sqrt{1 - c_4^2}}{c_4}`,
+      symbols: [
+        { tex: 'N', meaning: 'values in a group', unit: 'no unit', range: '2 to 100' },
+        { tex: 'd_2, d_3', meaning: 'mean and standard deviation of a range over the standard deviation of the values', unit: 'no unit' },
+        { tex: 'c_4', meaning: 'mean of a sample standard deviation over that of the values', unit: 'no unit' },
+        { tex: String.raw`\Phi, x`, meaning: 'share of the normal distribution below x; place in it', unit: 'no unit' },
+        { tex: String.raw`\Gamma`, meaning: 'gamma function', unit: 'no unit' },
+        { tex: 'D, B', meaning: 'limits of a range and of a standard deviation over their means, not below 0', unit: 'no unit' },
+      ],
+      sources: ['chart-constants'],
     },
   ],
   weaknesses: [

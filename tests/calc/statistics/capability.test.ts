@@ -1,7 +1,7 @@
 import fc from 'fast-check'
 import { sampleStandardDeviation } from 'simple-statistics'
 import { describe, expect, it } from 'vitest'
-import { cpkInterval, individualsChart, normalQuantile, processCapability } from '@/lib/calc/live'
+import { controlChartFactors, cpkInterval, individualsChart, normalQuantile, processCapability } from '@/lib/calc/live'
 import { deepFreeze } from '@/tests/support/deep-freeze'
 import { expectCalcError } from '@/tests/support/expect-calc-error'
 import { expectClose } from '@/tests/support/expect-close'
@@ -108,5 +108,32 @@ describe('individualsChart', () => {
     for (const bad of [undefined, null, [], [1], 'x']) expectCalcError(() => individualsChart(bad as never), 'values')
     expectCalcError(() => individualsChart([1, 2, '3' as never]), 'values.2')
     expectCalcError(() => individualsChart([1.7e308, -1.7e308]), 'values')
+  })
+})
+
+describe('controlChartFactors', () => {
+  it('has the closed forms of two values', () => {
+    const factors = controlChartFactors(2)
+    expectClose(factors.d2, 2 / Math.sqrt(Math.PI), { rel: 1e-8 })
+    expectClose(factors.d3, Math.sqrt(2 - 4 / Math.PI), { rel: 1e-8 })
+    expectClose(factors.c4, Math.sqrt(2 / Math.PI), { rel: 1e-14 })
+    // For three values the mean range is 3/√π.
+    expectClose(controlChartFactors(3).d2, 3 / Math.sqrt(Math.PI), { rel: 1e-8 })
+  })
+
+  it('larger groups have wider ranges and narrower limits, and no lower limit falls below 0', () => {
+    for (let n = 3; n <= 100; n += 1) {
+      const [before, factors] = [controlChartFactors(n - 1), controlChartFactors(n)]
+      expect(factors.d2).toBeGreaterThan(before.d2)
+      for (const key of ['meanByRange', 'meanBySd', 'sdUpper', 'rangeUpper'] as const) expect(factors[key]).toBeLessThan(before[key])
+      for (const key of ['sdLower', 'rangeLower'] as const) expect(factors[key]).toBeGreaterThanOrEqual(before[key])
+      expect(before.c4).toBeLessThan(factors.c4)
+      expect(factors.c4).toBeLessThan(1)
+    }
+    expect(controlChartFactors(2)).toMatchObject({ sdLower: 0, rangeLower: 0 })
+  })
+
+  it('names what is no number of values', () => {
+    for (const bad of [1, 0, 2.5, 101, Number.NaN, '5', undefined, null]) expectCalcError(() => controlChartFactors(bad as never), 'count')
   })
 })

@@ -17,4 +17,5 @@ export const statisticsCalls: Calls = {
   processCapability: [[scattered, { lower: 4, upper: 6, target: 5.1 }]],
   cpkInterval: [[scattered, { lower: 4, upper: 6, coverage: 0.9 }]],
   individualsChart: [[scattered]],
+  controlChartFactors: [[5]],
 }
