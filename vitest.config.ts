@@ -9,8 +9,8 @@ export default defineConfig({
   test: {
     maxWorkers: 2,
     projects: [
-      { extends: true, test: { name: 'calc', environment: 'node', include: ['tests/calc/**/*.test.ts', 'tests/units/**/*.test.ts', 'tests/schemas/**/*.test.ts', 'tests/scripts/**/*.test.ts'] } },
-      { extends: true, test: { name: 'published', environment: 'node', include: ['tests/published/**/*.test.ts'] } },
+      { extends: true, test: { name: 'calc', environment: 'node', include: ['tests/calc/**/*.test.ts', 'tests/units/**/*.test.ts', 'tests/schemas/**/*.test.ts', 'tests/scripts/**/*.test.ts'], testTimeout: 30_000 } },
+      { extends: true, test: { name: 'published', environment: 'node', include: ['tests/published/**/*.test.ts'], testTimeout: 30_000 } },
       {
         extends: true,
         test: {

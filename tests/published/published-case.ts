@@ -11,6 +11,8 @@ export interface PublishedCheck extends PublishedCall {
   readonly label: string
   /** When given, the value is divided by this one: for figures published as a ratio. */
   readonly over?: PublishedCall
+  /** The value is multiplied by this: for figures published in another unit, or as a share. */
+  readonly times?: number
   readonly expected: number
   /** Half of the last printed digit of the source, unless `toleranceReason` says why not. */
   readonly tolerance: { readonly abs: number } | { readonly rel: number }
@@ -44,4 +46,4 @@ const callOf = (library: Library, { fn, args, path }: PublishedCall): number => 
 
 /** What the library computes for a check. */
 export const computedValue = (library: Library, check: PublishedCheck): number =>
-  callOf(library, check) / (check.over ? callOf(library, check.over) : 1)
+  (callOf(library, check) / (check.over ? callOf(library, check.over) : 1)) * (check.times ?? 1)
