@@ -1,6 +1,6 @@
 // With the formula parser: a schedule may be a formula.
 import '../calc/index'
-import { evaluateScenario, type ScenarioResult } from '../calc/live'
+import { defaultLimits, evaluateClosedForms, type ScenarioResult } from '../calc/live'
 import type { RevisionDto } from '../schemas/revision-dto'
 
 /**
@@ -8,7 +8,8 @@ import type { RevisionDto } from '../schemas/revision-dto'
  * does not keep, are drawn anew from its own inputs.
  */
 export function drawnResult({ engine, sheet, limits, results }: Pick<RevisionDto, 'engine' | 'sheet' | 'limits' | 'results'>): ScenarioResult {
-  const { curves, stagger, power } = evaluateScenario({ engine: engine.spec, sheet }, limits).parts
+  // Curves are judged by nothing; a limit that came later has to be there all the same.
+  const { curves, stagger, power } = evaluateClosedForms({ engine: engine.spec, sheet }, { ...defaultLimits, ...limits }).parts
   const stored = results.parts
   return {
     ...results,

@@ -3,10 +3,11 @@ import { formatInput, type UnitSystem } from '../units'
 import type { FormValues } from './field'
 import { modelFields } from './model-fields'
 import type { ReadFields } from './read-fields'
+import type { StatedDefaults } from './stated-defaults'
 
 const isRecord = (value: unknown): value is Record<string, unknown> => typeof value === 'object' && value !== null
 
-const valueAt = (sheet: ScenarioSheet, path: string): unknown =>
+const valueAt = (sheet: object, path: string): unknown =>
   path.split('.').reduce<unknown>((value, key) => (isRecord(value) ? value[key] : undefined), sheet)
 
 const referenceNames = modelFields.map((field) => field.name).filter((name) => name.startsWith('reference.'))
@@ -20,8 +21,8 @@ export function numbersOfModel(sheet: ScenarioSheet): Record<string, number | nu
   return Object.fromEntries(numbers)
 }
 
-/** Texts of these fields in the person’s units. */
-export function modelToForm(sheet: ScenarioSheet, system: UnitSystem): FormValues {
+/** Texts of these fields in the person’s units; `sheet`: one, or these groups of it. */
+export function modelToForm(sheet: Omit<StatedDefaults, 'tolerances'>, system: UnitSystem): FormValues {
   return Object.fromEntries(modelFields.map(({ name, quantity = 'plain' }): [string, string] => {
     const value = valueAt(sheet, name)
     if (typeof value === 'number') return [name, formatInput(value, quantity, system)]

@@ -6,6 +6,7 @@ import { AppError } from '@/lib/errors'
 import { revisionDto, type RevisionDto } from '@/lib/schemas/revision-dto'
 import { toDto } from './dto'
 import { isoOf, isoOrNull } from './list-page'
+import { readResult } from './read-result'
 import { readSheet } from './read-sheet'
 
 // Of the people only their names: nothing else of a person belongs near a sheet.
@@ -22,9 +23,10 @@ export async function findRevision(em: EntityManager, scenario: Pick<Scenario, '
 
 /** The members a revision and a plan have in common. */
 export function revisionFields(revision: NamedRevision) {
-  const { number, title, engineVersion, engine, results, limits, calcVersion, author, releasedBy } = revision
+  const { number, title, engineVersion, engine, limits, calcVersion, author, releasedBy } = revision
   return {
-    scenarioId: revision.scenario.id, number, title, engineVersion, engine, results, limits, calcVersion,
+    scenarioId: revision.scenario.id, number, title, engineVersion, engine, limits, calcVersion,
+    results: readResult(revision.results),
     sheet: readSheet(revision.sheet, revision.sheetVersion),
     sheetVersion: revision.sheetVersion,
     author: { id: author.id, name: author.name },
