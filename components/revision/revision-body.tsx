@@ -32,7 +32,7 @@ export function RevisionBody({ scenario, result, system, name, reasons, beforeFi
       </Section>
       <FindingsList findings={result.findings} staleFindings={noFindings} system={system} reasons={reasons} />
       {beforeFigures}
-      <ResultLedgers parts={result.parts} stale={noParts} scenario={scenario} system={system} />
+      <ResultLedgers parts={result.parts} stale={noParts} isSaved scenario={scenario} system={system} />
     </>
   )
 }

@@ -19,6 +19,7 @@ interface WorkbenchHeadProps {
   result: ScenarioResult
   system: UnitSystem
   stale: boolean
+  pendingFindings: ReadonlySet<string>
   more: ReactNode
 }
 
@@ -39,7 +40,7 @@ function useOffline(): boolean {
 }
 
 /** Head of the working sheet: which revision, what it comes to, what can be done with it. */
-export function WorkbenchHead({ scenario, title, saved, dirty, saving, formId, result, system, stale, more }: WorkbenchHeadProps) {
+export function WorkbenchHead({ scenario, title, saved, dirty, saving, formId, result, system, stale, pendingFindings, more }: WorkbenchHeadProps) {
   const offline = useOffline()
   const outside = result.counts.outside
   const cannotSave = scenario.archived ? 'it is archived' : !scenario.canWrite ? 'your role reads it' : undefined
@@ -53,7 +54,7 @@ export function WorkbenchHead({ scenario, title, saved, dirty, saving, formId, r
           </>
         )}
         title={title || 'Scenario without a name'}
-        stamp={<SheetStamp result={result} system={system} stale={stale} />}
+        stamp={<SheetStamp result={result} system={system} stale={stale} pendingFindings={pendingFindings} />}
         actions={(
           <>
             <Button kind="do" type="submit" form={formId} name="intent" value="save" pending={saving} off={cannotSave}>Save</Button>

@@ -51,9 +51,9 @@ export function Workbench(props: WorkbenchProps) {
   const [formAnswer, formAction] = useActionState(props.save, { ok: false })
   const [view, setView] = useState<'result' | 'inputs'>('result')
   const context = { engine: props.engine.spec, limits, system, base: props.sheet }
-  const { live, context: now, edit, replace, setContext, turnTo } = useLiveEvaluation(() => {
-    const opened = startLive(props.values, props.sheet, props.result)
-    if (formAnswer.ok && formAnswer.data.kind === 'evaluated') return startLive(formAnswer.data.values, formAnswer.data.sheet, formAnswer.data.result)
+  const { live, context: now, edit, fillFrom, setContext, turnTo, warm } = useLiveEvaluation(() => {
+    const opened = startLive(props.values, props.sheet, props.result, context)
+    if (formAnswer.ok && formAnswer.data.kind === 'evaluated') return startLive(formAnswer.data.values, formAnswer.data.sheet, formAnswer.data.result, context)
     return !formAnswer.ok && formAnswer.values ? editLive(opened, formAnswer.values, context) : opened
   }, context)
   // The person changed their units while this page was open: what was typed turns with them.
@@ -80,8 +80,7 @@ export function Workbench(props: WorkbenchProps) {
   const fill = (revision: RevisionDto) => {
     const values = scenarioToForm(revision.title, revision.sheet, system)
     setSaved({ number: revision.number, at: revision.createdAt, by: revision.author.name, values })
-    setContext({ ...now, base: revision.sheet })
-    replace(editLive(startLive(values, revision.sheet, live.result), {}, { ...now, base: revision.sheet }))
+    fillFrom(values, { ...now, base: revision.sheet })
   }
   const onSubmit = (event: FormEvent<HTMLFormElement>) => {
     event.preventDefault()
@@ -93,11 +92,11 @@ export function Workbench(props: WorkbenchProps) {
     <div className="p-wb" data-view={view}>
       <WorkbenchHead
         scenario={scenario} title={live.values.title ?? ''} saved={saved} dirty={dirty} saving={saving} formId={formId} result={live.result} system={system}
-        stale={live.stale.size > 0} more={props.more}
+        stale={live.stale.size > 0} pendingFindings={live.pendingFindings} more={props.more}
       />
       <SaveAnswer answer={answer} values={live.values} errors={live.errors} system={system} onKeepMine={(theirs) => void submit(null, live.values, theirs.number)} onTakeTheirs={fill} />
       <div className="wb">
-        <form id={formId} className="book" aria-label="Inputs" action={formAction} onSubmit={onSubmit} noValidate>
+        <form id={formId} className="book" aria-label="Inputs" action={formAction} onSubmit={onSubmit} onFocus={warm} noValidate>
           <input type="hidden" name="baseRevision" value={saved.number} />
           <input type="hidden" name="filledFrom" value={saved.filledFrom ?? saved.number} />
           <input type="hidden" name="engineVersion" value={engineVersion} />
@@ -108,8 +107,8 @@ export function Workbench(props: WorkbenchProps) {
         <div className="res">
           <SheetNotices notices={shown.notices} engineChanged={props.engineChanged} archived={scenario.archived} canWrite={scenario.canWrite} />
           <TimingDrawings scenario={scenarioNow} result={live.result} deferred={shown} stale={live.stale} system={system} name={scenario.code} />
-          <FindingsList findings={live.result.findings} staleFindings={live.staleFindings} system={system} />
-          <ResultLedgers parts={shown.parts} stale={live.stale} scenario={shownScenario} system={system} />
+          <FindingsList findings={live.result.findings} staleFindings={live.staleFindings} pendingFindings={live.pendingFindings} system={system} />
+          <ResultLedgers parts={shown.parts} stale={live.stale} pending={live.pending} scenario={shownScenario} system={system} />
           <SpeedPlots parts={shown.parts} stale={live.stale} scenario={shownScenario} system={system} name={scenario.code} />
           <p className="fine">Judged by the program’s default limits, each named beside its finding; they are this shop’s to choose, no authority’s. These figures compare settings of one engine; they clear none for flight: ground-run, then flight-test as your rules and licensed practice say.</p>
         </div>

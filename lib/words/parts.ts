@@ -39,6 +39,8 @@ const remedies: Partial<Record<PartError['code'], string>> = {
 /** What stands in place of a figure that is withheld, and why; `isSaved`: in a revision that nobody computes again. */
 export function withheldWords(name: PartName, error: PartError, isSaved = false): { title: string; reason: string } {
   const { code, message } = error
+  // What could not be computed says so itself.
+  if (code === 'notComputed' && error.value === 'failed') return { title: `${partTitle[name]}: not computed`, reason: message }
   if (code === 'notComputed')
     return isSaved
       ? { title: `${partTitle[name]}: not computed`, reason: 'The version of the program that saved this revision did not compute it. Opened as a sheet and saved again, it is.' }
