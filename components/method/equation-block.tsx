@@ -17,8 +17,8 @@ function SymbolTable({ title, symbols }: { title: string, symbols: readonly Math
       <tbody>
         {symbols.map(({ tex, meaning, unit, range }) => (
           <tr key={tex}>
-            <th scope="row"><SetFormula mathml={inlineMath(tex)} /></th>
-            <td>{meaning}{range ? <small>{range}</small> : null}</td>
+            <td className="sym"><SetFormula mathml={inlineMath(tex)} /></td>
+            <th scope="row">{meaning}{range ? <small>{range}</small> : null}</th>
             <td className="unit">{unit}</td>
           </tr>
         ))}

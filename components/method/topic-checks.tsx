@@ -1,7 +1,7 @@
 'use client'
 
 import { useEffect } from 'react'
-import { Section } from '@/components/ui/section'
+import { SectionHead } from '@/components/ui/section'
 import { provenanceWords, type TopicCase } from '@/lib/method/topic-case'
 import { CheckInputs } from './check-inputs'
 import { CheckRow } from './check-row'
@@ -15,11 +15,12 @@ export function TopicChecks({ topic, cases }: { topic: string, cases: readonly T
   const counts = useCheckCounts(topic)
   useEffect(() => run.add(topic, cases.flatMap(({ id, checks }) => checks.map((check, i) => ({ key: keyOf(topic, id, i), check })))), [run, topic, cases])
   const total = cases.reduce((sum, { checks }) => sum + checks.length, 0)
-  if (total === 0) return <Section title="Published checks" level={3}><p className="fine">None: no published figure for these functions has been found yet.</p></Section>
+  if (total === 0) return <div className="sec"><SectionHead title="Published checks" level={3} /><p className="fine">None: no published figure for these functions has been found yet.</p></div>
   const done = counts?.computed === total
   const right = done ? (counts.outside > 0 ? `${counts.outside} of ${total} outside` : `${total} within`) : `${total} to compute`
   return (
-    <Section title="Published checks" right={right} level={3} className="checks">
+    <div className="sec checks">
+      <SectionHead title="Published checks" right={right} level={3} />
       <div className="chk hd" aria-hidden="true"><span>Verdict</span><span>Figure</span><span className="r">Expected</span><span className="r">Computed</span><span className="r">Difference</span><span className="r">Tolerance</span></div>
       {cases.map(({ id, title, provenance, source, note, checks }) => (
         <div className="case" key={id}>
@@ -31,6 +32,6 @@ export function TopicChecks({ topic, cases }: { topic: string, cases: readonly T
           <CheckInputs title={title} checks={checks} />
         </div>
       ))}
-    </Section>
+    </div>
   )
 }

@@ -1,4 +1,4 @@
-import { Section } from '@/components/ui/section'
+import { Section, SectionHead } from '@/components/ui/section'
 import type { Topic } from '@/lib/method/topic'
 import type { TopicCase } from '@/lib/method/topic-case'
 import { EquationBlock } from './equation-block'
@@ -11,9 +11,10 @@ export function TopicSection({ topic, cases }: { topic: Topic, cases: readonly T
       <Section title={topic.title}>
         <p className="prose">{topic.intro}</p>
         {topic.equations.map((equation) => <EquationBlock key={equation.id} {...equation} />)}
-        <Section title="Where it is weak" level={3} className="weak">
+        <div className="sec weak">
+          <SectionHead title="Where it is weak" level={3} />
           <ul className="rows">{topic.weaknesses.map((weakness) => <li key={weakness}>{weakness}</li>)}</ul>
-        </Section>
+        </div>
         <TopicChecks topic={topic.id} cases={cases} />
       </Section>
     </div>
