@@ -21,7 +21,10 @@ export interface InputRow {
 /** Stands where one side has nothing. */
 export const noneWord = 'none'
 
-const channelOf = (name: string) => (name.startsWith('primary.') ? 'primary' : name.startsWith('backup.') ? 'backup' : null)
+const channelOf = (name: string) => {
+  const letter = name.replace(/^coils\./, '')
+  return letter.startsWith('primary.') ? 'primary' : letter.startsWith('backup.') ? 'backup' : null
+}
 
 const tidy = (text: string) => text.replace(/\r\n?/g, '\n').trim()
 
@@ -35,14 +38,16 @@ function shownText(field: FieldDef, value: string): string {
   return field.kind === 'number' ? value.replace(/^-(?=\d)/, '−') : value
 }
 
-/** Step between two typed figures, whatever units they were typed in. None of these fields is a temperature, so a step converts like a value. */
+/** Step between two typed figures, whatever units they were typed in. Between two temperatures it is a difference: 20 K are 36 °F, not −424. */
 function numberStep(field: FieldDef, left: string, right: string, system: UnitSystem): { isSame: boolean; text: string } | null {
   const kind = field.quantity
   if (field.kind !== 'number' || !kind) return null
   const [from, to] = [parseQuantity(left, kind, system), parseQuantity(right, kind, system)]
   if (!from.ok || !to.ok) return null
-  const decimals = Math.min(6, Math.max(decimalsOf(left), decimalsOf(right)))
-  return { isSame: from.value === to.value, text: formatQuantity(to.value - from.value, kind, system, { decimals, sign: true }).text }
+  // Decimals of a power of ten stand behind its first digit, not behind the typed point.
+  const decimals = kind === 'failureRate' ? undefined : Math.min(6, Math.max(decimalsOf(left), decimalsOf(right)))
+  const stepKind = kind === 'temperature' ? 'temperatureDifference' : kind
+  return { isSame: from.value === to.value, text: formatQuantity(to.value - from.value, stepKind, system, { decimals, sign: true }).text }
 }
 
 /** A row for each speed of two tables; null where one side is empty or cannot be read. */

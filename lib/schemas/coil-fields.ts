@@ -6,8 +6,8 @@ import type { ChannelPrefix } from './scenario-fields'
 export const coilFields = (channel: ChannelPrefix): readonly FieldDef[] => {
   const at = (name: string) => `coils.${channel}.${name}`
   return [
-    numberField(at('ohm'), 'Primary, resistance', 'resistance', [0.05, 20], 'Cold, ballast and leads included.'),
-    numberField(at('mh'), 'Primary, inductance', 'inductance', [0.1, 100], 'From the coil’s sheet, or measured.'),
+    numberField(at('ohm'), 'Coil, resistance', 'resistance', [0.05, 20], 'Of the primary winding, cold, ballast and leads included.'),
+    numberField(at('mh'), 'Coil, inductance', 'inductance', [0.1, 100], 'Of the primary winding, from the coil’s sheet or measured.'),
     optionalField(at('limitA'), 'Current limited to', 'current', [0.5, 50], 'By the drive. Empty: not limited.'),
     numberField(at('dwellMs'), 'Dwell', 'timeMs', [0.1, 50], 'Time the current flows before each spark.'),
     numberField(at('supplyV'), 'Voltage, running', 'voltage', [3, 60], 'At the coil, drops of wires and switches taken off.'),

@@ -4,6 +4,9 @@ import { statedDefaults } from './stated-defaults'
 /** Middle of the published curvatures (1.8e-4 to 4e-4 per degree²). */
 const defaultCurvature = 3e-4
 
+/** Least advance that can be typed anywhere. */
+const lowestDeg = -20
+
 const roundTo = (value: number, step: number) => Math.round(value / step) * step
 
 /**
@@ -12,7 +15,8 @@ const roundTo = (value: number, step: number) => Math.round(value / step) * step
  */
 export function startingSheet(engine: Engine): ScenarioSheet {
   const primaryDeg = engine.powerTimingDeg
-  const backupDeg = primaryDeg - 8
+  const backupDeg = Math.max(lowestDeg, primaryDeg - 8)
+  const phased = (deg: number) => Math.max(lowestDeg, roundTo(deg - 6, 1))
   const { tolerances, ...others } = statedDefaults()
   return {
     ...others,
@@ -20,13 +24,13 @@ export function startingSheet(engine: Engine): ScenarioSheet {
     plugsPerCylinder: 1,
     selection: 'oneAtATime',
     primary: { schedule: { kind: 'fixed', deg: primaryDeg }, latencyUs: 0 },
-    backup: { schedule: { kind: 'fixed', deg: Math.max(-20, backupDeg) }, latencyUs: 0 },
+    backup: { schedule: { kind: 'fixed', deg: backupDeg }, latencyUs: 0 },
     mbt: { deg: Math.min(60, Math.max(0, primaryDeg + 8)), curvaturePerDeg2: defaultCurvature, provenance: 'guess', note: '' },
     propeller: { kind: 'fixedPitch', governedRpm: null, pitches: [{ name: 'as fitted', rpm: engine.maxRpm, kw: roundTo(engine.ratedPowerKw, 0.1) }] },
     runUpRpm: roundTo(engine.idleRpm + (engine.maxRpm - engine.idleRpm) * 0.45, 50),
     manifold: { idleKpa: 40, runUpKpa: 65, fullKpa: 98 },
     rotor: {
-      terminalWidthDeg: 12, rotorWidthDeg: 24, phasedAtDeg: roundTo((primaryDeg + backupDeg) / 2 - 6, 1), backupPhasedAtDeg: roundTo(backupDeg - 6, 1),
+      terminalWidthDeg: 12, rotorWidthDeg: 24, phasedAtDeg: phased((primaryDeg + backupDeg) / 2), backupPhasedAtDeg: phased(backupDeg),
       sparkDurationMs: 1.5, mechanicalCarriesRotor: true, plateRadiusMm: null,
     },
     tolerances: { timingCheckDeg: 1, benchDeg: 0.5, ...tolerances },

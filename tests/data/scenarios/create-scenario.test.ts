@@ -27,7 +27,7 @@ test('a new scenario is numbered after its engine and holds its first revision',
   expect(made).toMatchObject({
     code: 'N260-01', title: 'Climb timing', owner: { id: cast.actors.builder.userId, name: 'A builder' }, archivedAt: null, releasedRevision: null,
     engine: { ...engine, scenarioCount: 1 }, engineChanged: false, canWrite: true, canRelease: false,
-    revision: { number: 1, sheet: sheet(), sheetVersion: 1, engineVersion: 1, engine: { name: engine.name, code: 'N260', spec: engineSpec }, releaseReasons: null },
+    revision: { number: 1, sheet: sheet(), sheetVersion: 2, engineVersion: 1, engine: { name: engine.name, code: 'N260', spec: engineSpec }, releaseReasons: null },
   })
   expect(made.revision.results.findings.length).toBe(Object.values(made.revision.results.counts).reduce((sum, count) => sum + count, 0))
   expect(await getScenario(cast.author, made.id)).toEqual({ ...made, canRelease: true })
@@ -80,7 +80,7 @@ test('a sheet saved by a newer program is refused as such, not guessed at', asyn
   const { id } = await aScenario(cast.author, cast.author)
   await database.orm.em.fork().execute(`insert into revisions (scenario_id, shop_id, number, title, sheet, sheet_version, engine_version, engine, results,
     outside_count, close_count, within_count, limits, calc_version, author_id, search)
-    select scenario_id, shop_id, 2, title, '{}', 2, engine_version, engine, results, 0, 0, 0, limits, calc_version, author_id, search from revisions where scenario_id = ?`, [id])
+    select scenario_id, shop_id, 2, title, '{}', 3, engine_version, engine, results, 0, 0, 0, limits, calc_version, author_id, search from revisions where scenario_id = ?`, [id])
   expect(await refusalOf(getRevision(cast.author, id, 2))).toMatchObject({ code: 'newerSheet', message: expect.stringContaining('newer version') })
   expect((await getRevision(cast.author, id, 1)).sheet).toEqual(sheet())
 })

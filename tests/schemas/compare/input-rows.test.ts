@@ -61,6 +61,18 @@ describe('differences of two forms', () => {
     expect(rows(map('15'), { 'backup.map': '\t40\t95\n1000\t20\t15\n2000\t24\t22' })[0]?.difference).toBe('other speeds or pressures')
   })
 
+  it('takes a step between temperatures as a difference, in either system', () => {
+    expect(rows({ 'cycle.chargeK': '110 °C' }, { 'cycle.chargeK': '95' })[0]).toMatchObject({ left: '95', right: '110 °C', difference: '+15', unit: { symbol: '°C', joined: false } })
+    expect(rows({ 'cycle.chargeK': '220' }, { 'cycle.chargeK': '202' }, 'us')[0]).toMatchObject({ difference: '+18', unit: { symbol: '°F', joined: false } })
+  })
+
+  it('tells the coils of the channels apart, and a rate by its power of ten', () => {
+    expect(rows({ 'coils.backup.dwellMs': '4.5' }, { 'coils.backup.dwellMs': '3.5' })[0]).toMatchObject({ channel: 'backup', label: 'Dwell', difference: '+1.0' })
+    expect(rows({ 'coils.primary.limitA': '' })[0]).toMatchObject({ channel: 'primary', label: 'Coil current limited to', left: '7', right: 'none', difference: null })
+    expect(rows({ 'redundancy.ratesPerH.coil': '0.00004' }, { 'redundancy.ratesPerH.coil': '3e-5' })[0]).toMatchObject({ difference: '+1.0·10⁻⁵' })
+    expect(rows({ 'coils.primary.wastedSpark': 'on' })[0]).toMatchObject({ left: 'no', right: 'yes', label: 'Coil fires two cylinders at a time' })
+  })
+
   it('speaks in the units of the system', () => {
     const [from, to] = [120, 130].map((plateRadiusMm) => scenarioToForm('Climb', { ...startingSheet(sampleEngine), rotor: { ...startingSheet(sampleEngine).rotor, plateRadiusMm } }, 'us'))
     const [row] = inputRows(scenarioFields, from ?? {}, to ?? {}, 'us').filter((one) => !one.isSame)
