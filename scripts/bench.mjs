@@ -1,5 +1,8 @@
 #!/usr/bin/env node
 /** npm run bench: the measured hot paths against their aims, as a table of ratios. Never a test: machines differ. */
+import { mkdtempSync, rmSync } from 'node:fs'
+import { tmpdir } from 'node:os'
+import path from 'node:path'
 import { endAllGroups, runToEnd } from './lib/children.mjs'
 import { chromiumPath, installChromium, installPostgres } from './lib/debian.mjs'
 import { Failure, sentenceOf } from './lib/failure.mjs'
@@ -28,6 +31,36 @@ async function measure(args, env = {}) {
   return JSON.parse(outcome.tail.trim().split('\n').at(-1) ?? '')
 }
 
+/**
+ * Cycles a second of the same algorithm in C, with the equations as they stand and with the powers gathered; none where there is no compiler.
+ * Its figures must be the library's to 1e-9.
+ * @param {{ workJ: number, heatLossJ: number, knock: number }} ours
+ * @returns {Promise<(number | null)[]>}
+ */
+async function nativeCycles(ours) {
+  const folder = mkdtempSync(path.join(tmpdir(), 'halfspeed-bench-'))
+  try {
+    return await Promise.all([[], ['-DMERGED']].map(async (flags, i) => {
+      const program = path.join(folder, `cycle-${i}`)
+      const built = await runToEnd('gcc', ['-O2', '-std=c99', ...flags, '-o', program, inRoot('bench', 'limit', 'cycle.c'), '-lm'], { minutes: 1 }).catch(() => ({ ok: false, tail: '' }))
+      if (!built.ok) return null
+      /** @type {number[]} */
+      const speeds = []
+      for (let round = 0; round < 4; round += 1) {
+        const outcome = await runToEnd(program, ['4000'], { minutes: 2 })
+        const theirs = JSON.parse(outcome.tail.trim().split('\n').at(-1) ?? '')
+        for (const name of /** @type {const} */ (['workJ', 'heatLossJ', 'knock'])) {
+          if (Math.abs(theirs[name] / ours[name] - 1) > 1e-9) throw new Failure(`The cycle in C and the library differ in ${name}: ${theirs[name]} and ${ours[name]}.`)
+        }
+        speeds.push(theirs.perSecond)
+      }
+      return Math.max(...speeds)
+    }))
+  } finally {
+    rmSync(folder, { recursive: true, force: true })
+  }
+}
+
 /** @returns {Promise<Row[]>} */
 async function run() {
   await installPackages(say)
@@ -45,13 +78,22 @@ async function run() {
   const url = database.url(name)
   const evaluate = await measure(['--import', 'tsx', inRoot('bench', 'evaluate.bench.ts')])
   const faults = await measure(['--import', 'tsx', inRoot('bench', 'redundancy.bench.ts')])
+  const cycle = await measure(['--import', 'tsx', inRoot('bench', 'cycle.bench.ts')])
+  const [asWritten, merged] = await nativeCycles(cycle)
   const port = await freePort()
   const web = await startWeb({ port, databaseUrl: url, development: false })
   const page = await measure([inRoot('bench', 'page.bench.mjs')], { BASE_URL: web.address, CHROMIUM: chromiumPath() })
   const list = await measure(['--conditions=react-server', '--import', 'tsx', inRoot('bench', 'list.bench.ts')], { DATABASE_URL: url })
   return [
-    { what: 'whole evaluation, table schedule, median', measured: evaluate.table, aim: 5, unit: 'ms' },
-    { what: 'whole evaluation, formula schedule, median', measured: evaluate.formula, aim: 5, unit: 'ms' },
+    { what: 'closed forms of a scenario, table schedule, median', measured: evaluate.table, aim: 5, unit: 'ms' },
+    { what: 'closed forms of a scenario, formula schedule, median', measured: evaluate.formula, aim: 5, unit: 'ms' },
+    { what: 'simulateCycle, 0.5° steps', measured: cycle.ours, aim: 4000, unit: '1/s, at least' },
+    { what: 'simulateCycle, 2° steps', measured: cycle.oursAt2, aim: 17_000, unit: '1/s, at least' },
+    ...(asWritten ? [{ what: 'simulateCycle over the same in C, as the equations stand', measured: cycle.ours / asWritten, aim: 0.7, unit: '×, at least' }] : []),
+    ...(merged ? [{ what: 'simulateCycle over the same in C, powers gathered', measured: cycle.ours / merged, aim: 0.7, unit: '×, at least' }] : []),
+    { what: `the same accuracy: ${cycle.stepDeg}° steps over adaptive, ${cycle.tolerance}`, measured: cycle.oursAsExact / cycle.adaptive, aim: 12, unit: '×, at least' },
+    { what: 'spark map of 21 speeds by 11 pressures', measured: cycle.map, aim: 1000, unit: 'ms' },
+    { what: 'cycle layer of a scenario', measured: cycle.layer, aim: 250, unit: 'ms' },
     { what: 'fault tree, 25 events: cut sets, value, importance', measured: faults.solved, aim: 5, unit: 'ms' },
     { what: 'the same, first call', measured: faults.first, aim: 50, unit: 'ms' },
     { what: 'the same, mean over two intervals', measured: faults.averaged, aim: 5, unit: 'ms' },

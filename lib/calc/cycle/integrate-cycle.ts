@@ -21,9 +21,9 @@ export interface CycleState {
 
 /** Told of every step: for the course over crank angle, and for sparks that share one compression. */
 export interface Recorder {
-  readonly open: (thetaDeg: number, pressureKpa: number) => void
-  /** Angle and pressure at a step's end, kPa per degree at its start and end (they differ where two segments meet), and what the segment gave so far. */
-  readonly step: (thetaDeg: number, pressureKpa: number, slopeAtStart: number, slopeAtEnd: number, workJ: number, heatLossJ: number, knock: number) => void
+  readonly open: (thetaDeg: number, pressureKpa: number, kelvin: number) => void
+  /** Angle, pressure and temperature at a step's end, kPa per degree at its start and end (they differ where two segments meet), and what the segment gave so far. */
+  readonly step: (thetaDeg: number, pressureKpa: number, kelvin: number, slopeAtStart: number, slopeAtEnd: number, workJ: number, heatLossJ: number, knock: number) => void
 }
 
 /** Quantities at the ends and the middle of every step of a segment: index 2i is the start of step i, 2i + 1 its middle. */
@@ -52,7 +52,7 @@ export const makeNodes = (steps: number): Nodes => {
 const renewEvery = 128
 
 /** Below this the series of `rootOfNearOne` is exact to a few units of the last digit. */
-const nearOne = 0.02
+const nearOne = 0.03
 
 /** (1 − e)^(−q) by its binomial series, |e| < nearOne: powers change little from node to node, and a series costs less than a logarithm and an exponential. */
 const rootOfNearOne = (e: number, q: number): number => {
@@ -65,6 +65,12 @@ const rootOfNearOne = (e: number, q: number): number => {
   const square = e * e
   return 1 + q * e + square * (c2 + c3 * e + square * (c4 + c5 * e + square * (c6 + c7 * e)))
 }
+
+/** e^x by its series, |x| < nearOne. */
+const expOfNearZero = (x: number): number => 1 + x * (1 + (x / 2) * (1 + (x / 3) * (1 + (x / 4) * (1 + (x / 5) * (1 + x / 6)))))
+
+/** (γu − 1)/γu of the unburned gas, γu = 1.33. */
+const coldExponent = 0.33 / 1.33
 
 /** Geometry of a segment. Volume's two odd powers share one: (V/V₁)^−0.05 to the 11th and to the 26th. */
 export const fillGeometry = (cycle: PreparedCycle, { fromDeg, toDeg, steps }: Segment, nodes: Nodes): void => {
@@ -134,6 +140,7 @@ export const integrateSegment = (cycle: PreparedCycle, segment: Segment, nodes: 
   const { steps, fromDeg, burning, fired } = segment
   const knocking = segment.knocking && knockPerDeg > 0
   const cooled = cycle.cooling > 0
+  const autoignitionK = 3800 / startK
   const h = (segment.toDeg - fromDeg) / steps
   // Gas speed to the power −0.2, carried from stage to stage: speed·root is its power 0.8.
   let root = Math.exp(-0.2 * Math.log(gasMps))
@@ -145,8 +152,12 @@ export const integrateSegment = (cycle: PreparedCycle, segment: Segment, nodes: 
   let knock = 0
   let loss = 0
   let slope = 0
+  let nextKelvin = 0
   let knockRate = 0
-  recorder?.open(fromDeg, p)
+  // T₁/T_u and the pressure it belongs to, carried from sample to sample.
+  let cold = 1
+  let knockKpa = Infinity
+  recorder?.open(fromDeg, p, p * 1000 * (warmth[0] ?? 0))
   // Step −1 has its last stage only: the slope at the segment's start.
   for (let k = -1; k < steps; k += 1) {
     let stageSlope = slope
@@ -176,13 +187,25 @@ export const integrateSegment = (cycle: PreparedCycle, segment: Segment, nodes: 
         losses += weight * wallHeat
       } else {
         loss = wallHeat
+        nextKelvin = kelvin
       }
     }
     if (knocking) {
       let rates = knockRate
       for (let end = k < 0 ? 1 : 0; end < 2; end += 1) {
-        const log = Math.log((end === 1 ? next : (p + next) / 2 + (h / 8) * (slope - stageSlope)) / startKpa)
-        knockRate = knockPerDeg * Math.exp(1.7 * log - (3800 / startK) * Math.exp(-(0.33 / 1.33) * log))
+        const kpa = end === 1 ? next : (p + next) / 2 + (h / 8) * (slope - stageSlope)
+        const change = 1 - kpa / knockKpa
+        const nextCold = cold * rootOfNearOne(change, coldExponent)
+        const rise = autoignitionK * (cold - nextCold)
+        if (Math.abs(change) < nearOne && Math.abs(rise) < nearOne) {
+          knockRate *= rootOfNearOne(change, -1.7) * expOfNearZero(rise)
+          cold = nextCold
+        } else {
+          const log = Math.log(kpa / startKpa)
+          cold = Math.exp(-coldExponent * log)
+          knockRate = knockPerDeg * Math.exp(1.7 * log - autoignitionK * cold)
+        }
+        knockKpa = kpa
         rates += end === 1 ? knockRate : 4 * knockRate
       }
       if (k >= 0) knock += rates
@@ -190,7 +213,7 @@ export const integrateSegment = (cycle: PreparedCycle, segment: Segment, nodes: 
     if (k >= 0) {
       work += works
       heatLoss += losses
-      recorder?.step(fromDeg + (k + 1) * h, next, slope, stageSlope, (work * h * 1000) / 6, (heatLoss * h) / 6, (knock * h) / 6)
+      recorder?.step(fromDeg + (k + 1) * h, next, nextKelvin, slope, stageSlope, (work * h * 1000) / 6, (heatLoss * h) / 6, (knock * h) / 6)
     }
     p = next
     slope = stageSlope

@@ -7,7 +7,6 @@ import { fillGeometry, fillRelease, integrateSegment, makeNodes, segmentsOf } fr
 import { octaneExponent, prepareCycle, type PreparedCycle } from './prepare-cycle'
 import { refuseRunaway } from './runaway'
 import { wiebe } from './wiebe'
-import { volumeM3 } from '../geometry/slider-crank'
 
 /** The course as the integration leaves it, with the slopes that interpolation between its samples needs. */
 export interface RawCourse {
@@ -17,6 +16,7 @@ export interface RawCourse {
   readonly knock: number
   readonly thetaDeg: Float64Array
   readonly pressureKpa: Float64Array
+  readonly temperatureK: Float64Array
   /** kPa per degree at the start and at the end of the step that leads from sample i to i + 1. */
   readonly slopeAtStart: Float64Array
   readonly slopeAtEnd: Float64Array
@@ -29,21 +29,24 @@ export const runCycle = (checked: CheckedCycle): RawCourse => {
   const samples = segments.reduce((sum, { steps }) => sum + steps, 1)
   const thetaDeg = new Float64Array(samples)
   const pressureKpa = new Float64Array(samples)
+  const temperatureK = new Float64Array(samples)
   const slopeAtStart = new Float64Array(samples)
   const slopeAtEnd = new Float64Array(samples)
   const state = { pressureKpa: cycle.startKpa, workJ: 0, heatLossJ: 0, knock: 0 }
   const nodes = makeNodes(segments.reduce((most, { steps }) => Math.max(most, steps), 0))
   let count = 0
   const recorder = {
-    open: (theta: number, pressure: number) => {
+    open: (theta: number, pressure: number, kelvin: number) => {
       if (count > 0) return
       thetaDeg[0] = theta
       pressureKpa[0] = pressure
+      temperatureK[0] = kelvin
       count = 1
     },
-    step: (theta: number, pressure: number, atStart: number, atEnd: number) => {
+    step: (theta: number, pressure: number, kelvin: number, atStart: number, atEnd: number) => {
       thetaDeg[count] = theta
       pressureKpa[count] = pressure
+      temperatureK[count] = kelvin
       slopeAtStart[count - 1] = atStart
       slopeAtEnd[count - 1] = atEnd
       count += 1
@@ -56,7 +59,7 @@ export const runCycle = (checked: CheckedCycle): RawCourse => {
   }
   const { workJ, heatLossJ, knock } = state
   if (!Number.isFinite(workJ + heatLossJ + knock + state.pressureKpa)) throw refuseRunaway(checked)
-  return { cycle, workJ, heatLossJ, knock, thetaDeg, pressureKpa, slopeAtStart, slopeAtEnd }
+  return { cycle, workJ, heatLossJ, knock, thetaDeg, pressureKpa, temperatureK, slopeAtStart, slopeAtEnd }
 }
 
 /** The fit of γ turns upwards here. */
@@ -115,17 +118,12 @@ export function simulateCycle(input: CycleInput & { readonly arrays?: boolean })
   if (input.arrays !== undefined && typeof input.arrays !== 'boolean') {
     throw new CalcError({ field: 'arrays', value: input.arrays, limit: 'true or false', unit: '', message: 'Whether the course over crank angle is wanted must be true or false.' })
   }
-  const { cycle, workJ, heatLossJ, knock, thetaDeg, pressureKpa } = runCycle(checked)
-  const samples = thetaDeg.length
-  const temperatureK = new Float64Array(samples)
+  const { cycle, workJ, heatLossJ, knock, thetaDeg, pressureKpa, temperatureK } = runCycle(checked)
   let peak = 0
   let peakTemperatureK = 0
-  for (let i = 0; i < samples; i += 1) {
-    const pressure = pressureKpa[i] ?? 0
-    const kelvin = (pressure * 1000 * volumeM3(engine, thetaDeg[i] ?? 0)) / cycle.massR
-    temperatureK[i] = kelvin
-    if (pressure > (pressureKpa[peak] ?? 0)) peak = i
-    if (kelvin > peakTemperatureK) peakTemperatureK = kelvin
+  for (let i = 0; i < thetaDeg.length; i += 1) {
+    if ((pressureKpa[i] ?? 0) > (pressureKpa[peak] ?? 0)) peak = i
+    peakTemperatureK = Math.max(peakTemperatureK, temperatureK[i] ?? 0)
   }
   const top = parabolaTop(thetaDeg, pressureKpa, peak)
   const burnedAt = (theta: number): number => (burn ? wiebe(Math.min(1, (theta - cycle.startDeg) / burn.durationDeg), burn.a, burn.m) : 0)

@@ -49,7 +49,7 @@ export const compress = (checked: CheckedCycle): Compression => {
   const states: CycleState[] = [{ pressureKpa: cycle.startKpa, workJ: 0, heatLossJ: 0, knock: 0 }]
   integrateSegment({ ...cycle, startDeg: evoDeg, durationDeg: burn.durationDeg }, segment, nodes, { pressureKpa: cycle.startKpa, workJ: 0, heatLossJ: 0, knock: 0 }, {
     open: () => {},
-    step: (theta, pressureKpa, _start, _end, workJ, heatLossJ, knock) => {
+    step: (theta, pressureKpa, _kelvin, _start, _end, workJ, heatLossJ, knock) => {
       thetaDeg.push(theta)
       states.push({ pressureKpa, workJ, heatLossJ, knock })
     },

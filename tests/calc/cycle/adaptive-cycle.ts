@@ -1,5 +1,17 @@
-import { Solver } from 'odex'
+import { createRequire } from 'node:module'
 import type { CycleInput } from '@/lib/calc'
+
+/** The part of odex that is used: the types in its package do not pass this project's compiler settings, so it is required, not imported. */
+interface Solver {
+  absoluteTolerance: number
+  relativeTolerance: number
+  initialStepSize: number
+  solve(
+    slope: (x: number, y: number[]) => number[], from: number, start: number[], to: number,
+    output?: (step: number, from: number, to: number, y: number[]) => unknown,
+  ): { y: number[] }
+}
+const { Solver } = createRequire(import.meta.url)('odex') as { Solver: new (dimension: number) => Solver }
 
 /**
  * The cycle written a second time, plainly and from the specification's equations, and integrated by an adaptive extrapolation method:

@@ -5,7 +5,7 @@ import { expectCalcError } from '@/tests/support/expect-calc-error'
 import { expectClose } from '@/tests/support/expect-close'
 import { sampleCycle } from './cycles'
 
-const { fft } = create(fftDependencies, {})
+const { fft } = create(fftDependencies ?? {}, {})
 const six = firingSchedule({ firingOrder: [1, 6, 2, 4, 3, 5] })
 const torque = (changes: Partial<CrankTorqueInput> = {}) => crankTorque({ input: sampleCycle(), firingSchedule: six, reciprocatingMassKg: 0.6, ...changes })
 const magnitude = (value: { re: number, im: number } | undefined) => Math.hypot(value?.re ?? NaN, value?.im ?? NaN)
