@@ -1,5 +1,7 @@
-import type { ChannelName, MarkedSpeed, Part, PartError, PartName, ScenarioResult } from '../calc/live'
+import type { ChannelName, MarkedSpeed, PartError, PartName, ScenarioResult } from '../calc/live'
 import { formatQuantityText, type QuantityKind, type UnitSystem } from '../units'
+import { group } from './key-group'
+import { modelGroups } from './model-groups'
 
 /** One figure of an evaluation, in base units. */
 export interface KeyResult {
@@ -15,6 +17,8 @@ export interface KeyResult {
   decimals?: number
   /** A signed quantity: its sign shows always. */
   signed?: boolean
+  /** How far an uncertain figure reaches: it never stands without. */
+  spread?: string
 }
 
 export interface KeyGroup {
@@ -29,10 +33,6 @@ const channels = ['primary', 'backup'] as const
 const marked: readonly { speed: MarkedSpeed; at: string }[] = [
   { speed: 'cranking', at: 'cranking' }, { speed: 'idle', at: 'idle' }, { speed: 'runUp', at: 'run-up' }, { speed: 'full', at: 'full power' },
 ]
-
-function group<T>(id: PartName, title: string, part: Part<T>, rows: (part: T) => KeyResult[]): KeyGroup {
-  return part.ok ? { id, title, withheld: null, rows: rows(part) } : { id, title, withheld: part.error, rows: [] }
-}
 
 /**
  * The figures people compare and quote, in fixed order. Curves and findings are not among them.
@@ -73,6 +73,7 @@ export function keyResults(result: Pick<ScenarioResult, 'parts'>, system: UnitSy
       { id: `bestPhasing.${channel}`, label: 'Centred best at an advance of', channel, kind: 'angle', value: bestPhasingDeg[channel] },
       { id: `endOffset.${channel}`, label: `Off centre at the spark’s end, ${formatQuantityText(worst[channel].rpm, 'engineSpeed', system)}`, channel, kind: 'distributorAngle', value: worst[channel].endOffsetDeg, signed: true },
     ])),
+    ...modelGroups(parts, system),
     group('marks', 'Timing marks', parts.marks, ({ mmPerDeg }) => [{ id: 'marks', label: 'One degree on the damper', channel: null, kind: 'markSpacing', value: mmPerDeg }]),
   ]
 }

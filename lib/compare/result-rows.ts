@@ -41,7 +41,8 @@ const sameWord = 'same'
 
 function step(left: number | null | undefined, right: number | null | undefined, kind: QuantityKind, system: UnitSystem, decimals?: number): string | null {
   if (left === null || left === undefined || right === null || right === undefined) return null
-  const { text } = formatQuantity(right - left, kind, system, { sign: true, decimals })
+  // 20 K more is 36 °F more, not −424 °F.
+  const { text } = formatQuantity(right - left, kind === 'temperature' ? 'temperatureDifference' : kind, system, { sign: true, decimals })
   return /[1-9]/.test(text) ? text : sameWord
 }
 
@@ -83,7 +84,7 @@ export function keyRows(left: Result, right: Result, system: UnitSystem): Result
   const lefts = keyResults(left, system)
   const rights = keyResults(right, system)
   const side = (row: KeyResult | undefined): ResultSide | null =>
-    (row ? { text: row.value === null ? row.none ?? 'none' : formatQuantity(row.value, row.kind, system, { sign: row.signed, decimals: row.decimals }).text, verdict: null } : null)
+    (row ? { text: row.value === null ? row.none ?? 'none' : formatQuantity(row.value, row.kind, system, { sign: row.signed, decimals: row.decimals }).text, verdict: null, spread: row.spread ?? null } : null)
   return lefts.flatMap((group, i): ResultGroup[] => {
     const others = rights[i]?.rows ?? []
     const ids = [...new Set([...group.rows, ...others].map((row) => row.id))]
