@@ -14,8 +14,8 @@ function coilDrafts({ engine, sheet }: ReadyScenario, { coils }: ScenarioParts, 
   const { dwellMs, ambientK } = sheet.coils[channel]
   const inputs = [`sheet.coils.${channel}.dwellMs`]
   return [
-    { limitId: 'windingK', channel, value: windingK, data: { currentA, powerW, dwellMs, ambientK, rpm: engine.maxRpm }, inputs: [...inputs, `sheet.coils.${channel}.ambientK`], sourceIds: ['iec-60085'], method: 'coil-heat' },
-    { limitId: 'periodShare', channel, value: periodShare, data: { dwellMs, sparkDurationMs: sheet.rotor.sparkDurationMs, rpm: engine.maxRpm }, inputs, sourceIds: ['trade'], method: 'spark-period' },
+    { limitId: 'windingK', channel, value: windingK, data: { currentA, powerW, dwellMs, ambientK, rpm: engine.maxRpm }, inputs: [...inputs, `sheet.coils.${channel}.ambientK`], sourceIds: ['iec-60085'] },
+    { limitId: 'periodShare', channel, value: periodShare, data: { dwellMs, sparkDurationMs: sheet.rotor.sparkDurationMs, rpm: engine.maxRpm }, inputs, sourceIds: ['trade'] },
   ]
 }
 
@@ -25,7 +25,7 @@ function climbDrafts({ sheet }: ReadyScenario, { climb }: ScenarioParts): Draft[
   return [{
     limitId: 'climbMps', channel: null, value: row.climbMps,
     data: { densityAltitudeM: climb.densityAltitudeM, massKg: sheet.airframe.massKg, powerKw: row.powerKw, rpm: row.rpm, ceilingM: row.ceilingM, verdict: row.verdict },
-    inputs: ['sheet.airframe.massKg', 'sheet.conditions.pressureAltitudeM'], sourceIds: ['gagg-ferrar-1934', 'trade'], method: 'climb',
+    inputs: ['sheet.airframe.massKg', 'sheet.conditions.pressureAltitudeM'], sourceIds: ['gagg-ferrar-1934', 'trade'],
   }]
 }
 
@@ -38,6 +38,6 @@ function redundancyDrafts(_scenario: ReadyScenario, { redundancy }: ScenarioPart
       lowPerHour: row.lowPerHour, highPerHour: row.highPerHour, checkIntervalHours: redundancy.checkIntervalHours,
       singlePoints: redundancy.singlePoints.map(({ id }) => id).join(', '), heatSensitive: redundancy.singlePoints.some(({ heatSensitive }) => heatSensitive),
     },
-    inputs: ['sheet.redundancy.checkIntervalHours'], sourceIds: ['ac-23-1309-1e'], method: 'redundancy',
+    inputs: ['sheet.redundancy.checkIntervalHours'], sourceIds: ['ac-23-1309-1e'],
   }]
 }

@@ -22,7 +22,7 @@ function detonationDrafts({ sheet }: ReadyScenario, { detonation, stack }: Scena
       ...(channel === 'backup' ? { gainDeg, gainOctane } : {}),
     },
     inputs: [`sheet.${channel}.schedule`, `sheet.${channel}.latencyUs`, 'sheet.fuel.worseOctane', 'sheet.worse.hotterK'],
-    sourceIds: ['douaud-eyzat-1978', 'livengood-wu-1955'], method: 'knock',
+    sourceIds: ['douaud-eyzat-1978', 'livengood-wu-1955'],
   }]
 }
 
@@ -36,6 +36,6 @@ function sparkDrafts({ engine, sheet }: ReadyScenario, { spark }: ScenarioParts,
       atCranking, rpm: atCranking ? engine.crankingRpm : engine.maxRpm, gapMm: sheet.plugGapMm,
       demandKv: atCranking ? crankingDemandKv : demandKv, offeredKv: atCranking ? crankingOfferedKv : offeredKv,
     },
-    inputs: [`sheet.coils.${channel}.dwellMs`, 'sheet.plugGapMm'], sourceIds: ['wadhwa'], method: 'spark-margin',
+    inputs: [`sheet.coils.${channel}.dwellMs`, 'sheet.plugGapMm'], sourceIds: ['wadhwa'],
   }]
 }

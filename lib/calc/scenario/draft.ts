@@ -13,7 +13,6 @@ export interface Draft {
   data: Finding['data']
   inputs: string[]
   sourceIds: string[]
-  method: string
 }
 
 const rank: Record<Verdict, number> = { outside: 0, close: 1, within: 2 }

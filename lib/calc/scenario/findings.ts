@@ -32,7 +32,7 @@ function crankingDraft(scenario: ReadyScenario, channel: ChannelName, stackDeg: 
     limitId: 'crankingAdvanceDeg', channel, value: worst.deg,
     data: { stackDeg, rpm: worst.rpm, released: worst.released, slowestRpm: crankingSlowestRpm, fastestRpm: crankingFastestRpm },
     inputs: [...scheduleInputs(channel), `sheet.${channel}.crankRetard.byDeg`, 'engine.crankingSlowestRpm', 'engine.crankingFastestRpm'],
-    sourceIds: ['trade'], method: 'spark-advance',
+    sourceIds: ['trade'],
   }
 }
 
@@ -41,7 +41,7 @@ function retardDrafts({ engine, sheet }: Scenario, channel: ChannelName): Draft[
   const retard = sheet[channel].crankRetard
   if (!retard || retard.byDeg === 0) return []
   const hysteresisRpm = retard.hysteresisRpm ?? 0
-  const shared = { channel, inputs: [`sheet.${channel}.crankRetard.belowRpm`], sourceIds: ['trade'], method: 'spark-advance' }
+  const shared = { channel, inputs: [`sheet.${channel}.crankRetard.belowRpm`], sourceIds: ['trade'] }
   return [
     {
       ...shared, limitId: 'retardAboveCrankingRpm', value: retard.belowRpm - hysteresisRpm - engine.crankingFastestRpm,
@@ -61,7 +61,7 @@ function beyondMbtDraft({ sheet }: Scenario, channel: ChannelName, curve: CurveP
   return {
     limitId: 'beyondMbtDeg', channel, value: worst.deg - sheet.mbt.deg,
     data: { stackDeg, rpm: worst.rpm, deg: worst.deg, mbtDeg: sheet.mbt.deg, provenance: sheet.mbt.provenance },
-    inputs: [...scheduleInputs(channel), 'sheet.mbt.deg'], sourceIds: ['heywood-1988', 'crossley-cook-1991'], method: 'timing-torque',
+    inputs: [...scheduleInputs(channel), 'sheet.mbt.deg'], sourceIds: ['heywood-1988', 'crossley-cook-1991'],
   }
 }
 
@@ -74,7 +74,7 @@ function backupFirstDraft(scenario: ReadyScenario, stackDeg: number | null): Dra
   const smallest = reports.reduce((least, point) => (point.staggerDeg < least.staggerDeg - 1e-12 ? point : least))
   return {
     limitId: 'backupFirstDeg', channel: null, value: smallest.staggerDeg, data: { stackDeg, rpm: smallest.rpm, staggerMs: smallest.staggerMs },
-    inputs: ['sheet.primary.schedule', 'sheet.backup.schedule'], sourceIds: ['trade'], method: 'stagger',
+    inputs: ['sheet.primary.schedule', 'sheet.backup.schedule'], sourceIds: ['trade'],
   }
 }
 
@@ -84,7 +84,7 @@ function proofDraft(scenario: Scenario, channel: ChannelName, proof: { rpm: PerC
     limitId: 'proofAboveIdleRpm', channel, value: proof.rpm[channel], limit: engine.idleRpm + limits.proofAboveIdleRpm.value,
     data: { idleRpm: engine.idleRpm, maxRpm: engine.maxRpm, toleranceDeg: proof.toleranceDeg, followsPressure: dependsOnPressure(sheet[channel]) },
     // The retard stands in the way only where it acts above idle.
-    inputs: [...scheduleInputs(channel), ...((sheet[channel].crankRetard?.belowRpm ?? 0) > engine.idleRpm ? [`sheet.${channel}.crankRetard.belowRpm`] : []), 'sheet.tolerances.timingCheckDeg', 'engine.idleRpm'], sourceIds: ['trade'], method: 'proof-speed',
+    inputs: [...scheduleInputs(channel), ...((sheet[channel].crankRetard?.belowRpm ?? 0) > engine.idleRpm ? [`sheet.${channel}.crankRetard.belowRpm`] : []), 'sheet.tolerances.timingCheckDeg', 'engine.idleRpm'], sourceIds: ['trade'],
   }
 }
 
@@ -105,24 +105,24 @@ function drafts(scenario: ReadyScenario, parts: ScenarioParts, limits: Limits): 
   if (power.ok) add(() => ({
     limitId: 'backupPowerRatio', channel: 'backup', value: power.backupToPrimary,
     data: { rpm: engine.maxRpm, primaryKw: power.atMax.primaryKw, backupKw: power.atMax.backupKw, shortOfMbtDeg: power.shortOfMbtDeg.backup },
-    inputs: ['sheet.backup.schedule', 'sheet.mbt.deg'], sourceIds: ['heywood-1988', 'crossley-cook-1991', 'trade'], method: 'timing-torque',
+    inputs: ['sheet.backup.schedule', 'sheet.mbt.deg'], sourceIds: ['heywood-1988', 'crossley-cook-1991', 'trade'],
   }))
   if (proof.ok) for (const channel of channelNames) add(() => proofDraft(scenario, channel, proof, limits))
   if (register.ok) for (const channel of channelNames) {
     const { rpm, registerDeg, freeDeg, endOffsetDeg } = register.worst[channel]
     const phasedAtDeg = channel === 'backup' && sheet.distribution === 'capEach' ? sheet.rotor.backupPhasedAtDeg : sheet.rotor.phasedAtDeg
-    const shared = { channel, data: { rpm, endOffsetDeg, phasedAtDeg, bestPhasingDeg: register.bestPhasingDeg[channel], sparkDurationMs: sheet.rotor.sparkDurationMs }, inputs: [channel === 'backup' && sheet.distribution === 'capEach' ? 'sheet.rotor.backupPhasedAtDeg' : 'sheet.rotor.phasedAtDeg'], sourceIds: ['trade'], method: 'rotor-register' }
+    const shared = { channel, data: { rpm, endOffsetDeg, phasedAtDeg, bestPhasingDeg: register.bestPhasingDeg[channel], sparkDurationMs: sheet.rotor.sparkDurationMs }, inputs: [channel === 'backup' && sheet.distribution === 'capEach' ? 'sheet.rotor.backupPhasedAtDeg' : 'sheet.rotor.phasedAtDeg'], sourceIds: ['trade'] }
     add(() => [{ ...shared, limitId: 'registerDeg', value: registerDeg }, { ...shared, limitId: 'freeDeg', value: freeDeg }])
   }
   if (leads.ok) add(() => ({
     limitId: 'leadsOutOfPlace', channel: null, value: leads.outOfPlace,
     data: { expected: leads.expected.join(' '), actual: leads.actual.join(' '), rotation: engine.distributorRotation },
-    inputs: ['engine.capTerminals', 'engine.firingOrder', 'engine.distributorRotation'], sourceIds: ['trade'], method: 'firing-schedule',
+    inputs: ['engine.capTerminals', 'engine.firingOrder', 'engine.distributorRotation'], sourceIds: ['trade'],
   }))
   list.push(...closedDrafts(scenario, parts))
   if (marks.ok) add(() => ({
     limitId: 'markSpacingMm', channel: null, value: marks.mmPerDeg, data: { diameterMm: engine.damperDiameterMm },
-    inputs: ['engine.damperDiameterMm'], sourceIds: ['timing-arithmetic'], method: 'arc',
+    inputs: ['engine.damperDiameterMm'], sourceIds: ['timing-arithmetic'],
   }))
   return list
 }

@@ -195,8 +195,6 @@ export interface Finding {
   /** Dotted paths of the inputs that drive it (`sheet.primary.schedule`). */
   inputs: string[]
   sourceIds: string[]
-  /** Anchor of its equation. */
-  method: string
 }
 
 export interface ScenarioParts {
