@@ -7,9 +7,9 @@ export const octaneScale: Record<OctaneScale, string> = { ron: 'RON', mon: 'MON'
 
 const isScale = (text: unknown): text is OctaneScale => typeof text === 'string' && Object.hasOwn(octaneScale, text)
 
-/** "91 RON", "93.2 RON". */
-export function octaneWords(octane: number, scale: unknown): string {
-  return `${formatNumber(octane, Number.isInteger(octane) ? 0 : 1)}\u00a0${isScale(scale) ? octaneScale[scale] : 'octane'}`
+/** "91 RON" as typed; "93.2 RON" where it was computed. */
+export function octaneWords(octane: number, scale: unknown, decimals = Number.isInteger(octane) ? 0 : 1): string {
+  return `${formatNumber(octane, decimals)}\u00a0${isScale(scale) ? octaneScale[scale] : 'octane'}`
 }
 
 /** What no figure of detonation stands without. */
@@ -57,7 +57,7 @@ export function detonationSentence(finding: Finding, system: UnitSystem): string
   const lines = [
     begins,
     `${capital(octaneUncertaintyWords(uncertain, data.anchored === true))}: ${low === null ? 'with that much less there is no margin at all' : `with that much less the margin is ${low}`}.`,
-    `It asks for ${octaneWords(Number(dataNumber(finding, 'octaneRequired').toFixed(1)), data.scale)}; as planned, ${planned === null ? 'there is no margin either' : `the margin is ${planned}`}.`,
+    `It asks for ${octaneWords(dataNumber(finding, 'octaneRequired'), data.scale, 1)}; as planned, ${planned === null ? 'there is no margin either' : `the margin is ${planned}`}.`,
     sensitivityWords({ perOctaneDeg: data.perOctaneDeg, per10KDeg: data.per10KDeg, per10KpaDeg: data.per10KpaDeg }, system),
     channel === 'backup' && typeof data.gainDeg === 'number' && typeof data.gainOctane === 'number' ? gainWords(data.gainDeg, data.gainOctane, system) : null,
   ].filter((line) => line !== null)

@@ -63,7 +63,7 @@ export function DetonationLedger(props: LedgersProps) {
                     cells: [
                       words[name], <ChannelChip key="chip" channel={letters[channel]} spoken />, q(point.rpm, 'engineSpeed'), q(point.sparkDeg, 'angle'),
                       <LimitCell key="limit" point={point} system={system} />, <MarginCell key="margin" point={point} system={system} />,
-                      reach(point, system), octaneWords(Number(point.octaneRequired.toFixed(1)), scale),
+                      reach(point, system), octaneWords(point.octaneRequired, scale, 1),
                     ],
                   }
                 }))}
