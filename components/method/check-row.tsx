@@ -9,10 +9,10 @@ function Figure({ name, children }: { name: string, children: string | null }) {
 }
 
 /** One figure: verdict, what it is, expected, computed, difference, tolerance. */
-export const CheckRow = memo(function CheckRow({ check, outcome }: { check: PublishedCheck, outcome: CheckOutcome | undefined }) {
+export const CheckRow = memo(function CheckRow({ check, outcome, folded = false }: { check: PublishedCheck, outcome: CheckOutcome | undefined, folded?: boolean }) {
   const isBad = outcome !== undefined && isOutside(outcome)
   return (
-    <li className={`chk${isBad ? ' hit' : ''}`}>
+    <li className={`chk${isBad ? ' hit' : ''}${folded ? ' folded' : ''}`}>
       <VerdictMark verdict={outcome === undefined ? 'notJudged' : isBad ? 'outside' : 'within'}>{outcome === undefined ? 'Waits' : undefined}</VerdictMark>
       <span className="what">
         {check.label}

@@ -2,9 +2,8 @@
 
 import { useEffect } from 'react'
 import { SectionHead } from '@/components/ui/section'
-import { provenanceWords, type TopicCase } from '@/lib/method/topic-case'
-import { CheckInputs } from './check-inputs'
-import { CheckRow } from './check-row'
+import type { TopicCase } from '@/lib/method/topic-case'
+import { CaseChecks } from './case-checks'
 import { useCheckCounts, useCheckRun } from './check-run-context'
 
 const keyOf = (topic: string, id: string, index: number) => `${topic}/${id}/${index}`
@@ -22,16 +21,7 @@ export function TopicChecks({ topic, cases }: { topic: string, cases: readonly T
     <div className="sec checks">
       <SectionHead title="Published checks" right={right} level={3} />
       <div className="chk hd" aria-hidden="true"><span>Verdict</span><span>Figure</span><span className="r">Expected</span><span className="r">Computed</span><span className="r">Difference</span><span className="r">Tolerance</span></div>
-      {cases.map(({ id, title, provenance, source, note, checks }) => (
-        <div className="case" key={id}>
-          <p className="casehead"><b>{title}</b> <span className="fine">{source}</span> <span className={`tag ${provenance.replace(' ', '-')}`}>{provenanceWords[provenance]}</span></p>
-          {note ? <p className="fine">{note}</p> : null}
-          <ul className="rows" aria-label={title}>
-            {checks.map((check, i) => <CheckRow key={i} check={check} outcome={run.outcomeOf(keyOf(topic, id, i))} />)}
-          </ul>
-          <CheckInputs title={title} checks={checks} />
-        </div>
-      ))}
+      {cases.map((published) => <CaseChecks key={published.id} published={published} outcomes={published.checks.map((_, i) => run.outcomeOf(keyOf(topic, published.id, i)))} />)}
     </div>
   )
 }

@@ -43,6 +43,7 @@ for (const colorScheme of ['light', 'dark'] as const) {
     await page.context().close()
   })
   test(`nothing to mend on the public pages, ${colorScheme}`, async ({ browser }) => {
+    test.setTimeout(180_000)
     const context = await browser.newContext({ colorScheme })
     const page = await context.newPage()
     const clean = watch(page)
