@@ -34,19 +34,26 @@ const carriedOctane = 100
 /** The model's own octane scale against the fuel's: shifted where a reference setting anchors it. */
 const scaleFor = (octane: number): number => (carriedOctane / octane) ** octaneExponent
 
+const sweepAt = (model: CycleModel, rpm: number, pressureKpa: number, hotterK: number): SparkSweep =>
+  sweepSparks(compress(checkCycle(model.inputAt(rpm, pressureKpa, 0, { hotterK, octane: carriedOctane }))))
+
+/** A typed charge that does not make the power carried says nothing of detonation. */
+export function refuseMismatch({ mismatch }: CycleModel): void {
+  if (Math.abs(mismatch) <= mismatchAllowed) return
+  throw withheld(
+    'chargeMismatch', 'sheet.cycle.volumetricEfficiency',
+    `With the volumetric efficiency typed the charge makes ${(100 * Math.abs(mismatch)).toFixed(0)} % ${mismatch < 0 ? 'less' : 'more'} power than the power curve says.`, mismatch, `within ${100 * mismatchAllowed} %`,
+  )
+}
+
 export function detonationPart(scenario: ReadyScenario, model: CycleModel): PartFigures<'detonation'> {
   const { sheet, engine } = scenario
-  if (Math.abs(model.mismatch) > mismatchAllowed) {
-    throw withheld(
-      'chargeMismatch', 'sheet.cycle.volumetricEfficiency',
-      `With the volumetric efficiency typed the charge makes ${(100 * Math.abs(model.mismatch)).toFixed(0)} % ${model.mismatch < 0 ? 'less' : 'more'} power than the power curve says.`, model.mismatch, `within ${100 * mismatchAllowed} %`,
-    )
-  }
+  refuseMismatch(model)
   const stateAt = (rpm: number, pressureKpa: number, hotterK: number): ChargeState => {
-    const sweep = sweepSparks(compress(checkCycle(model.inputAt(rpm, pressureKpa, 0, { hotterK, octane: carriedOctane }))))
+    const sweep = sweepAt(model, rpm, pressureKpa, hotterK)
     return { sweep, grid: sparkGrid(sweep) }
   }
-  const shift = octaneShiftOf(scenario, model, stateAt)
+  const shift = octaneShiftOf(scenario, model)
   const uncertainty = sheet.reference === null ? octaneUncertainty : anchoredUncertainty
 
   const limitOf = ({ sweep, grid }: ChargeState, octane: number) => firstKnock(sweep, grid, scaleFor(Math.max(1, octane - shift)))
@@ -120,13 +127,13 @@ function lapseOf({ sheet }: ReadyScenario): number {
 }
 
 /** By how much the fuel's octane number lies above what the model would ask for, at a setting known to run clean with a margin. */
-function octaneShiftOf({ sheet, engine }: ReadyScenario, model: CycleModel, stateAt: (rpm: number, pressureKpa: number, hotterK: number) => ChargeState): number {
+export function octaneShiftOf({ sheet, engine }: ReadyScenario, model: CycleModel): number {
   const { reference } = sheet
   if (reference === null) return 0
   if (reference.rpm < engine.idleRpm || reference.rpm > engine.maxRpm)
     throw withheld('runUpOutside', 'sheet.reference.rpm', `The reference setting must lie between idle, ${engine.idleRpm} rpm, and full power, ${engine.maxRpm} rpm.`, reference.rpm, `${engine.idleRpm} … ${engine.maxRpm}`)
   const { pressureKpa } = model.carriedAt(reference.rpm)
-  const { sweep } = stateAt(reference.rpm, pressureKpa, 0)
+  const sweep = sweepAt(model, reference.rpm, pressureKpa, 0)
   const limitDeg = reference.sparkDeg + reference.marginDeg
   if (limitDeg > sweep.toDeg || limitDeg < sweep.fromDeg)
     throw withheld('runUpOutside', 'sheet.reference.sparkDeg', `Spark and margin of the reference together must lie in ${sweep.fromDeg} … ${sweep.toDeg}°.`, limitDeg, `${sweep.fromDeg} … ${sweep.toDeg}`)

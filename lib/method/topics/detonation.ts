@@ -4,7 +4,7 @@ export const detonation = defineTopic({
   id: 'detonation',
   title: 'Detonation',
   intro: 'Unburned gas ahead of the flame lights itself if pressure and heat last long enough. The integral says how far that has come by the end of the burn; 1 or more means detonation is to be expected.',
-  functions: ['knockLimitedSpark', 'sparkMap', 'autoignitionDelayMs'],
+  functions: ['knockLimitedSpark', 'sparkMap', 'sparkMapOf', 'manifoldKpaFromCharge', 'chargeKpaFromManifold', 'autoignitionDelayMs'],
   equations: [
     {
       id: 'knock-delay', title: 'Time to self-ignition', tex: String.raw`\tau = 17.68 \left(\frac{O}{100}\right)^{3.402} p^{-1.7} \exp\left(\frac{3800}{T_\mathrm{u}}\right)`,
@@ -50,6 +50,16 @@ export const detonation = defineTopic({
       id: 'octane-uncertainty', title: 'What the margin is worth', tex: String.raw`\text{margin}\left(O \pm 5\right), \qquad \text{after a clean reference: margin}\left(O \pm 1\right)`,
       note: 'A margin carries ±5 octane numbers, turned into degrees, and is judged by its worse end. A setting of this engine known to run clean shifts the scale so that the model agrees with it, and ±1 is left. Differences between settings carry none of it.',
       symbols: [{ tex: 'O', meaning: 'octane, on the one scale that was typed for every fuel: no conversion is made', unit: 'no unit' }],
+      sources: [], basis: 'choice of this program',
+    },
+    {
+      id: 'spark-map', title: 'Spark over speed and charge', tex: String.raw`\alpha(n, p) = \min\left(\alpha_\mathrm{MBT}(n, p),\, \alpha_\mathrm{K}(n, p)\right), \qquad p_\mathrm{man} = p\,\frac{p_\mathrm{man,full}}{p_\mathrm{full}}`,
+      note: 'At each place the burn is scaled from full power. The charge pressure at inlet closing is not the manifold pressure a unit measures: the two are taken to be in proportion, which is right at full throttle only.',
+      symbols: [
+        { tex: String.raw`\alpha`, meaning: 'spark of the map; of best torque; limit', unit: '°', range: '−20 to 60; none where every spark detonates' },
+        { tex: 'n', meaning: 'speed', unit: 'rpm', range: 'more than 0' },
+        { tex: String.raw`p, p_\mathrm{man}`, meaning: 'charge pressure at inlet closing; manifold pressure', unit: 'kPa', range: 'more than 0' },
+      ],
       sources: [], basis: 'choice of this program',
     },
   ],

@@ -10,6 +10,8 @@ export const cycleCalls: Calls = {
   findMbt: [[coarse]],
   knockLimitedSpark: [[coarse]],
   sparkMap: [[{ ...coarse, rpm: [2000], pressureKpa: [100], burnScaling: { reference: { rpm: 2650, pressureKpa: 112 }, speedExponent: 0.3, pressureExponent: -0.2 } }]],
+  manifoldKpaFromCharge: [[{ chargeKpa: 60, fullChargeKpa: 110, fullManifoldKpa: 98 }]],
+  chargeKpaFromManifold: [[{ manifoldKpa: 60, fullChargeKpa: 110, fullManifoldKpa: 98 }]],
   scaleBurn: [[{ reference: { rpm: 2500, pressureKpa: 100, delayDeg: 9, durationDeg: 67 }, rpm: 1800, pressureKpa: 80, speedExponent: 0.3, pressureExponent: -0.2 }]],
   calibrateBurn: [[coarse, { mbtDeg: 32, delayShare: 0.12 }]],
   crankTorque: [[{ input: coarse, firingSchedule: six, dead: [2], reciprocatingMassKg: 0.6, exhaustKpa: 105, crankcaseKpa: 101, intakeKpa: 90 }]],
