@@ -111,7 +111,8 @@ export function cycleModel(scenario: ReadyScenario): CycleModel {
       if (rpm === maxRpm) return full
       const throttleKw = fullKwAt(rpm)
       const loadKw = Math.max(...sheet.propeller.pitches.map((pitch) => pitchLoadKw(pitch, rpm)))
-      const isThrottled = loadKw < throttleKw && sheet.propeller.kind === 'fixedPitch'
+      // The coarsest pitch known asks for most; a constant-speed propeller whose high stop is not known may ask for all there is.
+      const isThrottled = loadKw < throttleKw && (sheet.propeller.kind === 'fixedPitch' || sheet.propeller.pitches.length > 1)
       const powerKw = isThrottled ? loadKw : throttleKw
       const sparkDeg = isThrottled ? scenario.advance('primary', rpm, sheet.manifold.fullKpa) : powerTimingDeg
       const pressureKpa = typedKpa ?? solve(rpm, powerKw, sparkDeg, (kpa) => burnAt(rpm, kpa))

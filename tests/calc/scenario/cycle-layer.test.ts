@@ -4,6 +4,8 @@ import {
   findMbt, knockLimitedSpark, mepFromPower, powerAtDensityRatio, scaleBurn, simulateCycle, sparkDemandKv, sparkEnergyMj, sparkMargin, standardAtmosphere,
   type CycleInput, type Engine, type Part, type Scenario, type ScenarioSheet,
 } from '@/lib/calc'
+import { cycleModel } from '@/lib/calc/scenario/cycle-model'
+import { readyScenario } from '@/lib/calc/scenario/ready-scenario'
 import { displacementCc, frictionPowerAt } from '@/lib/calc/scenario/power-parts'
 import { deepFreeze } from '@/tests/support/deep-freeze'
 import { expectClose } from '@/tests/support/expect-close'
@@ -41,6 +43,14 @@ describe('charge and power belong together', () => {
     const cc = displacementCc(engine)
     expectClose(imepKpa - mepFromPower({ powerKw: frictionPowerAt(engine, engine.maxRpm), displacementCc: cc, rpm: engine.maxRpm }), mepFromPower({ powerKw: 50, displacementCc: cc, rpm: engine.maxRpm }), { rel: 1e-5 })
     expect(got(evaluateScenario(plain).parts.charge)).toMatchObject({ from: 'power', mismatch: 0, powerKw: 50 })
+  })
+
+  test('below full power the charge is the propeller’s: its coarsest pitch known, all there is where that is not', () => {
+    const pitches = [{ name: 'low stop', rpm: 2780, kw: 40 }, { name: 'high stop', rpm: 2400, kw: 60 }]
+    const at = (kind: 'fixedPitch' | 'constantSpeed', known: typeof pitches) => cycleModel(readyScenario(scenario({}, { propeller: { kind, governedRpm: 2600, pitches: known } }))).carriedAt(1600).powerKw
+    expectClose(at('fixedPitch', pitches.slice(0, 1)), 40 * (1600 / 2780) ** 3, { rel: 1e-12 })
+    expectClose(at('constantSpeed', pitches), 60 * (1600 / 2400) ** 3, { rel: 1e-12 })
+    expectClose(at('constantSpeed', pitches.slice(0, 1)), 20 + (12.5 * 400) / 600, { rel: 1e-12 })
   })
 
   test('the burn is calibrated: the cycle’s own best spark is the one stated', () => {
