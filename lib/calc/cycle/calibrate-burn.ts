@@ -55,10 +55,19 @@ export const calibrateBurn = (input: CycleInput, target: CalibrateBurnTarget): B
     if (mbtDeg <= sweep.fromDeg || mbtDeg >= sweep.toDeg) throw refuse()
     return slopeAt(sweep, mbtDeg)
   }
+  const givesMbt = (totalDeg: number): boolean => {
+    const sweep = sweepOf(totalDeg)
+    const best = bestOnGrid(sweep, sparkGrid(sweep))
+    return best !== null && Math.abs(best.sparkDeg - mbtDeg) <= 0.01
+  }
   let [low, high] = [shortestDeg, longestDeg]
   let [atLow, atHigh] = [slope(low), slope(high)]
-  // A longer burn wants an earlier spark: the slope rises with the total.
-  if (!(atLow < 0 && atHigh > 0)) throw refuse()
+  // A longer burn wants an earlier spark: the slope rises with the total. At an end itself its sign is rounding.
+  if (!(atLow < 0 && atHigh > 0)) {
+    const end = atLow < 0 ? longestDeg : shortestDeg
+    if (givesMbt(end)) return anglesOf(end)
+    throw refuse()
+  }
   let side = 0
   for (let i = 0; i < 60 && high - low > 1e-4; i += 1) {
     let middle = (low * atHigh - high * atLow) / (atHigh - atLow)
@@ -77,8 +86,6 @@ export const calibrateBurn = (input: CycleInput, target: CalibrateBurnTarget): B
     }
   }
   const totalDeg = (low + high) / 2
-  const sweep = sweepOf(totalDeg)
-  const best = bestOnGrid(sweep, sparkGrid(sweep))
-  if (!best || Math.abs(best.sparkDeg - mbtDeg) > 0.01) throw refuse()
+  if (!givesMbt(totalDeg)) throw refuse()
   return anglesOf(totalDeg)
 }

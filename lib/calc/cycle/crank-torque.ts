@@ -44,18 +44,19 @@ const pressureAt = ({ thetaDeg, pressureKpa, slopeAtStart, slopeAtEnd }: RawCour
 }
 
 const takeSchedule = (value: unknown) => {
-  const schedule = takeList(value, 'firingSchedule', 'The firing schedule', 1).map((entry, i) => {
-    const members = takeRecord(entry, `firingSchedule.${i}`, `Firing ${i + 1}`)
-    return {
-      cylinder: takeNumber(members.cylinder, `firingSchedule.${i}.cylinder`, { name: 'The cylinder', unit: '', min: 1, integer: true }),
-      atDeg: takeNumber(members.atDeg, `firingSchedule.${i}.atDeg`, { name: 'The angle of firing', unit: 'deg', min: 0, below: cycleDeg }),
-    }
-  })
+  const list = takeList(value, 'firingSchedule', 'The firing schedule', 1)
+  const schedule: { cylinder: number, atDeg: number }[] = []
   const seen = new Set<number>()
-  schedule.forEach(({ cylinder }, i) => {
-    if (seen.has(cylinder)) throw new CalcError({ field: `firingSchedule.${i}.cylinder`, value: cylinder, limit: 'each cylinder once', unit: '', message: `Cylinder ${cylinder} fires twice in the schedule.` })
+  // By index: a hole in the list is a missing firing.
+  for (let i = 0; i < list.length; i += 1) {
+    const field = `firingSchedule.${i}`
+    const members = takeRecord(list[i], field, `Firing ${i + 1}`)
+    const cylinder = takeNumber(members.cylinder, `${field}.cylinder`, { name: 'The cylinder', unit: '', min: 1, integer: true })
+    const atDeg = takeNumber(members.atDeg, `${field}.atDeg`, { name: 'The angle of firing', unit: 'deg', min: 0, below: cycleDeg })
+    if (seen.has(cylinder)) throw new CalcError({ field: `${field}.cylinder`, value: cylinder, limit: 'each cylinder once', unit: '', message: `Cylinder ${cylinder} fires twice in the schedule.` })
     seen.add(cylinder)
-  })
+    schedule.push({ cylinder, atDeg })
+  }
   return schedule
 }
 

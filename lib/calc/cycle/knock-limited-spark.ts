@@ -61,9 +61,19 @@ export const firstKnock = (sweep: SparkSweep, grid: readonly SparkPoint[], scale
     const top = topBetween(f, grid[i - 2]?.sparkDeg ?? low, high)
     if (top.value >= 0) return { state: 'limited', limitDeg: settle(f, grid[i - 2]?.sparkDeg ?? low, Math.min(before, -1e-12), top.at, top.value) }
   }
+  // A top inside the last stretch has no sample beyond it to show it; it lies hardly above the last one.
+  const [before, last] = [grid.length - 2, grid.length - 1]
+  const [fBefore, fLast] = [levels[before] ?? 0, levels[last] ?? 0]
+  if (fLast > fBefore && fLast > -nearOne) {
+    const lowDeg = grid[before]?.sparkDeg ?? sweep.fromDeg
+    const top = topBetween(f, lowDeg, sweep.toDeg)
+    if (top.value >= 0) return { state: 'limited', limitDeg: settle(f, lowDeg, fBefore, top.at, top.value) }
+  }
   return { state: 'never', limitDeg: null }
 }
 
+/** Logarithm of the knock integral below which no top within one stretch of the grid reaches 1. */
+const nearOne = 0.1
 const golden = (Math.sqrt(5) - 1) / 2
 
 const topBetween = (f: (x: number) => number, from: number, to: number): { at: number, value: number } => {

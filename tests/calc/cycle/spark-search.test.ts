@@ -70,6 +70,18 @@ describe('knockLimitedSpark', () => {
     expect(knockLimitedSpark(sampleCycle({ octane: top + 0.05 })).state).toBe('never')
   })
 
+  it('finds a band within the last stretch of its grid, past the last sample but one and over before the last', () => {
+    const late = { ...burn, delayDeg: 14 }
+    const asked = (sparkDeg: number) => simulateCycle({ ...sampleCycle({ burn: { ...late, sparkDeg } }), arrays: false }).knock?.octaneRequired ?? NaN
+    const octane = asked(58.65) - 0.004
+    expect(asked(60)).toBeLessThan(octane - 0.05)
+    expect(asked(56)).toBeLessThan(asked(60))
+    const { limitDeg } = knockLimitedSpark(sampleCycle({ burn: late, octane }))
+    expectClose(knockAt(sampleCycle({ burn: late, octane }), limitDeg ?? NaN), 1, { abs: 1e-5 })
+    expect(limitDeg).toBeLessThan(58.65)
+    expect(knockLimitedSpark(sampleCycle({ burn: late, octane: octane + 0.01 })).state).toBe('never')
+  })
+
   it('says never and always, both without a limit', () => {
     expect(knockLimitedSpark(sampleCycle({ octane: 130 }))).toEqual({ limitDeg: null, marginDeg: null, state: 'never' })
     expect(knockLimitedSpark(sampleCycle({ octane: 30 }))).toEqual({ limitDeg: null, marginDeg: null, state: 'always' })
@@ -101,6 +113,14 @@ describe('calibrateBurn', () => {
     const { mbtDeg } = findMbt(sampleCycle())
     const { delayDeg, durationDeg } = calibrateBurn(sampleCycle(), { mbtDeg, delayShare: 9 / 76 })
     expectClose(delayDeg + durationDeg, 76, { abs: 0.03 })
+  })
+
+  it('the shortest burn tried, 30° in all, still counts', () => {
+    const shortest = sampleCycle({ burn: { ...burn, delayDeg: 3.6, durationDeg: 26.4 } })
+    const { mbtDeg } = findMbt(shortest)
+    const { delayDeg, durationDeg } = calibrateBurn(shortest, { mbtDeg })
+    expectClose(delayDeg + durationDeg, 30, { abs: 0.03 })
+    expectCalcError(() => calibrateBurn(shortest, { mbtDeg: mbtDeg - 0.05 }), 'mbtDeg')
   })
 
   it('refuses an angle that no burn gives', () => {
