@@ -1,7 +1,6 @@
-import type { FormValues } from '@/lib/schemas/field'
+import { fieldIndex, type FormValues } from '@/lib/schemas/field'
 import { scenarioFields } from '@/lib/schemas/scenario-fields'
-import { fieldIndex } from '@/lib/schemas/field'
-import { unitOf, type UnitSystem } from '@/lib/units'
+import { formatQuantityText, parseQuantity, unitOf, type UnitSystem } from '@/lib/units'
 
 const index = fieldIndex(scenarioFields)
 
@@ -10,6 +9,11 @@ function figure(name: string, values: FormValues, system: UnitSystem): string {
   const text = (values[name] ?? '').trim()
   const quantity = index.get(name)?.quantity
   if (text === '') return '…'
+  // A temperature is stored in another unit than it is shown in: its decimals say nothing.
+  if (quantity === 'temperature') {
+    const read = parseQuantity(text, quantity, system)
+    return read.ok ? formatQuantityText(read.value, quantity, system) : text
+  }
   if (!quantity || /[^\d.,+\-−e\s]/i.test(text)) return text
   const { symbol, joined } = unitOf(quantity, system)
   return symbol === '' ? text : `${text}${joined ? '' : '\u00a0'}${symbol}`
