@@ -33,7 +33,7 @@ test('the shop holds three engines, sheets of every kind, one archived, and two 
   const noor = await signedIn('noor@juniper.example')
   expect((await listEngines(noor, { sort: 'code' })).rows.map((row) => row.code)).toEqual(['J200', 'J260', 'J360'])
   const { rows } = await listScenarios(noor, { sort: 'code' })
-  expect(rows.map(({ code, counts }) => [code, counts.outside])).toEqual([['J200-01', 0], ['J260-01', 0], ['J260-03', 1], ['J260-04', 0], ['J260-05', 1], ['J360-01', 2]])
+  expect(rows.map(({ code, counts }) => [code, counts.outside])).toEqual([['J200-01', 0], ['J260-01', 0], ['J260-03', 1], ['J260-04', 0], ['J260-05', 1], ['J360-01', 0]])
   expect((await listScenarios(noor, { state: 'archived' })).rows.map(({ code, counts }) => [code, counts.outside])).toEqual([['J260-02', 2]])
   const kinds = new Set<string>()
   for (const { id } of [...rows, ...(await listScenarios(noor, { state: 'archived' })).rows]) {
