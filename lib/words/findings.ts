@@ -24,10 +24,10 @@ const titles: Record<Finding['limitId'], string> = {
   freeDeg: 'Free angle to the next terminal',
   leadsOutOfPlace: 'Lead order on the cap',
   markSpacingMm: 'Timing marks',
-  detonationDeg: 'Detonation margin, worst case',
+  detonationDeg: 'Margin to detonation',
   windingK: 'Coil winding',
-  sparkVoltageRatio: 'Spark voltage offered over asked for',
-  periodShare: 'Dwell and spark in the spark period',
+  sparkVoltageRatio: 'Spark voltage in hand',
+  periodShare: 'Spark period used',
   climbMps: 'Climb with one cylinder cold',
   noSparkPerH: 'No spark at all',
 }

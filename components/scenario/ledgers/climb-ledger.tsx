@@ -16,7 +16,7 @@ export function ClimbLedger(props: LedgersProps) {
       {({ rows }) => (
         <>
           <Ledger
-            caption="Power at the propeller, best climb or least descent, and ceiling" columns={[{ head: '' }, { head: 'propeller', right: true }, { head: 'climb', right: true }, { head: 'ceiling', right: true }]}
+            caption="Power at the propeller, best climb or least descent, and ceiling" columns={[{ head: 'full throttle' }, { head: 'propeller', right: true }, { head: 'climb', right: true }, { head: 'ceiling', right: true }]}
             rows={rows.map(({ state, rpm, powerKw, verdict, climbMps, speedMps, ceilingM }) => ({
               key: state,
               cells: [

@@ -11,7 +11,7 @@ export function ChargeLedger(props: LedgersProps) {
       {({ rpm, powerKw, pressureKpa, volumetricEfficiency, from, mismatch, delayDeg, durationDeg, mbtDeg }) => (
         <>
           <Ledger
-            caption="Charge at inlet closing and burn, full throttle" columns={[{ head: `at ${formatQuantityText(rpm, 'engineSpeed', system)}` }, { head: '', right: true }]}
+            caption="Charge at inlet closing and burn, full throttle" columns={[{ head: `at ${formatQuantityText(rpm, 'engineSpeed', system)}` }, { head: 'full throttle', right: true }]}
             rows={[
               { key: 'kpa', cells: ['Charge at inlet closing', q(pressureKpa, 'pressure')] },
               { key: 've', cells: ['Volumetric efficiency', q(volumetricEfficiency, 'ratio')] },

@@ -32,8 +32,11 @@ function MarginCell({ point: { marginDeg, state }, system }: { point: Detonation
   return <>{state === 'never' ? 'at least ' : null}<Quantity value={marginDeg} kind="angle" system={system} /></>
 }
 
-const reach = ({ lowDeg, highDeg }: DetonationPoint, system: UnitSystem) =>
-  [lowDeg, highDeg].map((value) => (value === null ? 'none' : formatQuantityText(value, 'angle', system))).join(' to ')
+/** With more octane a limit that was not reached is not reached either: then there is no upper end to give. */
+function reach({ lowDeg, highDeg, state }: DetonationPoint, system: UnitSystem): string {
+  const [low, high] = [lowDeg, highDeg].map((value) => (value === null ? 'none' : formatQuantityText(value, 'angle', system)))
+  return state === 'never' ? `${low} or more` : `${low} to ${high}`
+}
 
 /** Margin to detonation of each channel, with what it is worth; never without its caution. */
 export function DetonationLedger(props: LedgersProps) {

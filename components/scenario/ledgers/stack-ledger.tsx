@@ -16,7 +16,7 @@ export function StackLedger(props: LedgersProps) {
       {({ rows, expandedDeg, worstCaseDeg, staggerExpandedDeg }) => (
         <>
           <Ledger
-            caption="Tolerances of the timing and what they come to, crank degrees" columns={[{ head: 'may be off by' }, { head: '', right: true }]}
+            caption="Tolerances of the timing and what they come to, crank degrees" columns={[{ head: 'may be off by' }, { head: 'crank degrees', right: true }]}
             rows={[
               ...rows.map((row) => ({ key: row.what, cells: [what[row.what], within(row.halfWidthDeg)] })),
               { key: 'expanded', breakAbove: true, cells: ['Together, 95 in 100', within(expandedDeg)] },
