@@ -7,8 +7,15 @@ type Library = Readonly<Record<string, unknown>>
 
 /** A slice of work short enough that a key pressed meanwhile is not felt to wait, ms. */
 const sliceMs = 12
+/** Rows are drawn anew this often at most: drawing hundreds costs more than computing them. */
+const drawMs = 250
 
 const whenIdle = (work: () => void) => (typeof requestIdleCallback === 'function' ? requestIdleCallback(work, { timeout: 50 }) : setTimeout(work, 1))
+
+const none: CheckCounts = { computed: 0, within: 0, outside: 0 }
+
+const add = (left: CheckCounts, right: CheckCounts): CheckCounts =>
+  ({ computed: left.computed + right.computed, within: left.within + right.within, outside: left.outside + right.outside })
 
 /** The library as the browser first gets it, with the formula parser only where a check needs it. */
 async function loadLibrary(needsFormula: boolean): Promise<Library> {
@@ -26,8 +33,10 @@ export class CheckRun {
   private readonly outcomes = new Map<string, CheckOutcome>()
   private readonly taken = new Set<string>()
   private readonly groups = new Map<string, CheckCounts>()
-  private all: CheckCounts = { computed: 0, within: 0, outside: 0 }
+  private all: CheckCounts = none
   private readonly listeners = new Set<() => void>()
+  private readonly undrawn = new Map<string, CheckCounts>()
+  private drawnAt = 0
   private state: 'idle' | 'running' | 'failed' = 'idle'
 
   readonly subscribe = (listener: () => void) => {
@@ -67,18 +76,24 @@ export class CheckRun {
   }
 
   private slice(library: Library): void {
-    const changed = new Map<string, CheckCounts>()
     for (const until = performance.now() + sliceMs; this.waiting.length > 0 && performance.now() < until;) {
       const next = this.waiting.shift()
       if (!next) break
       const outcome = judgeCheck(library, next.check)
       this.outcomes.set(next.key, outcome)
-      changed.set(next.group, count(changed.get(next.group) ?? this.groups.get(next.group), outcome))
-      this.all = count(this.all, outcome)
+      this.undrawn.set(next.group, count(this.undrawn.get(next.group) ?? this.groups.get(next.group), outcome))
     }
-    for (const [group, counts] of changed) this.groups.set(group, counts)
-    if (this.waiting.length > 0) whenIdle(() => this.slice(library))
-    else this.state = 'idle'
+    const isDone = this.waiting.length === 0
+    if (isDone || performance.now() - this.drawnAt >= drawMs) this.draw()
+    if (isDone) this.state = 'idle'
+    else whenIdle(() => this.slice(library))
+  }
+
+  private draw(): void {
+    for (const [group, counts] of this.undrawn) this.groups.set(group, counts)
+    this.undrawn.clear()
+    this.all = [...this.groups.values()].reduce(add, none)
+    this.drawnAt = performance.now()
     this.tell()
   }
 
@@ -87,7 +102,5 @@ export class CheckRun {
   }
 }
 
-function count(before: CheckCounts | undefined, outcome: CheckOutcome): CheckCounts {
-  const { computed, within, outside } = before ?? { computed: 0, within: 0, outside: 0 }
-  return { computed: computed + 1, within: within + (isOutside(outcome) ? 0 : 1), outside: outside + (isOutside(outcome) ? 1 : 0) }
-}
+const count = (before: CheckCounts | undefined, outcome: CheckOutcome): CheckCounts =>
+  add(before ?? none, isOutside(outcome) ? { computed: 1, within: 0, outside: 1 } : { computed: 1, within: 1, outside: 0 })

@@ -45,7 +45,8 @@ function computedDecimals(check: PublishedCheck): number {
 }
 
 export const expectedText = (check: PublishedCheck): string => figure(check.expected, printedDecimals(check))
-export const computedText = (check: PublishedCheck, value: number): string => figure(value, computedDecimals(check))
+/** As far as its tolerance tells anything; a figure met exactly, like a count, as it was printed. */
+export const computedText = (check: PublishedCheck, value: number): string => (value === check.expected ? expectedText(check) : figure(value, computedDecimals(check)))
 
 /** One digit finer than the computed figure, and written like it; below that it is rounding, and shown as none. */
 export function differenceText(check: PublishedCheck, difference: number): string {

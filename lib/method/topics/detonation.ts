@@ -7,7 +7,7 @@ export const detonation = defineTopic({
   functions: ['knockLimitedSpark', 'sparkMap', 'sparkMapOf', 'manifoldKpaFromCharge', 'chargeKpaFromManifold', 'autoignitionDelayMs'],
   equations: [
     {
-      id: 'knock-delay', title: 'Time to self-ignition', tex: String.raw`\tau = 17.68 \left(\frac{O}{100}\right)^{3.402} p^{-1.7} \exp\left(\frac{3800}{T_\mathrm{u}}\right)`,
+      id: 'knock-delay', title: 'Time to self-ignition', tex: String.raw`\tau = 17.68 \left(\frac{O}{100}\right)^{3.402} p^{-1.7}\, \exp\left(\frac{3800}{T_\mathrm{u}}\right)`,
       symbols: [
         { tex: String.raw`\tau`, meaning: 'time to self-ignition at this state', unit: 'ms' },
         { tex: 'O', meaning: 'octane number of the fuel', unit: 'no unit', range: 'more than 0; fitted on primary reference fuels of 80 to 100' },

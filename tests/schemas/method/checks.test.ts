@@ -47,6 +47,7 @@ describe('figures', () => {
     ['a tolerance with a reason says nothing of the digits', check({ expected: 0.9, tolerance: { abs: 0.02 }, toleranceReason: 'Said as “about”.' }), 0.9101, '0.9', '0.910', '+0.0101', '±0.02'],
     ['a small one in powers of ten', check({ expected: 3.50133e-5, tolerance: { rel: 1e-5 } }), 3.5013314e-5, '3.50133\u00a0×\u00a010⁻⁵', '3.501331\u00a0×\u00a010⁻⁵', '+1.4\u00a0×\u00a010⁻¹¹', '±0.00001 of it'],
     ['dust of rounding is no difference', check({ expected: 0.8, tolerance: { abs: 0.005 } }), 0.8 + 1e-15, '0.80', '0.8000', '0', '±0.005'],
+    ['a count has no decimals', check({ expected: 392, tolerance: { abs: 1e-9 } }), 392, '392', '392', '0', '±1\u00a0×\u00a010⁻⁹'],
     ['none', check({ expected: 0, tolerance: { abs: 0.05 } }), 0, '0', '0', '0', '±0.05'],
   ])('%s', (_, one, value, expected, computed, difference, tolerance) => {
     expect([expectedText(one), computedText(one, value), differenceText(one, value - one.expected), toleranceText(one)]).toEqual([expected, computed, difference, tolerance])

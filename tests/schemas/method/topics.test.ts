@@ -11,7 +11,7 @@ import { someCases } from '@/tests/support/cases'
 
 /** They compose, read, rank or store what the topics explain. */
 const notExplained = [
-  'CalcError', 'loadFormulaParser', 'judge', 'evaluateScenario', 'inputErrors', 'partsStandingOn', 'rankFindings', 'displacementCc',
+  'CalcError', 'loadFormulaParser', 'judge', 'evaluateScenario', 'evaluateClosedForms', 'addCycleLayer', 'inputErrors', 'partsStandingOn', 'rankFindings', 'displacementCc',
   'dependsOnPressure', 'findSpeedPoint', 'speedPointAt', 'storedResult',
 ]
 
