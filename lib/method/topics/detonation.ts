@@ -48,7 +48,7 @@ export const detonation = defineTopic({
     },
     {
       id: 'octane-uncertainty', title: 'What the margin is worth', tex: String.raw`\text{margin}\left(O \pm 5\right), \qquad \text{after a clean reference: margin}\left(O \pm 1\right)`,
-      note: 'A margin carries ±5 octane numbers, turned into degrees, and is judged by its worse end. A setting of this engine known to run clean shifts the scale so that the model agrees with it, and ±1 is left. Differences between settings carry none of it.',
+      note: 'A margin carries ±5 octane numbers, turned into degrees: outside when the value itself is short of its limit, close when only the worse end is. A setting of this engine known to run clean shifts the scale so that the model agrees with it, and ±1 is left. Differences between settings carry none of it.',
       symbols: [{ tex: 'O', meaning: 'octane, on the one scale that was typed for every fuel: no conversion is made', unit: 'no unit' }],
       sources: [], basis: 'choice of this program',
     },
