@@ -1,4 +1,5 @@
 import { usesFormula, isOutside, judgeCheck, type CheckOutcome } from '@/lib/method/judge-check'
+import { rememberLast } from '@/lib/method/remember-last'
 import type { PublishedCheck } from '@/tests/published/published-case'
 
 export interface CheckCounts { computed: number, within: number, outside: number }
@@ -21,7 +22,7 @@ const add = (left: CheckCounts, right: CheckCounts): CheckCounts =>
 async function loadLibrary(needsFormula: boolean): Promise<Library> {
   const library = await import('@/lib/calc/live')
   if (needsFormula) await library.loadFormulaParser()
-  return { ...library }
+  return rememberLast({ ...library })
 }
 
 /**

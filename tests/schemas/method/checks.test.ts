@@ -2,6 +2,7 @@ import { describe, expect, it } from 'vitest'
 import * as calc from '@/lib/calc'
 import { computedText, differenceText, expectedText, toleranceText } from '@/lib/method/check-figures'
 import { allowedDifference, isOutside, judgeCheck, usesFormula } from '@/lib/method/judge-check'
+import { rememberLast } from '@/lib/method/remember-last'
 import { casesOfTopic } from '@/lib/method/topic-cases'
 import type { PublishedCase, PublishedCheck } from '@/tests/published/published-case'
 
@@ -37,6 +38,34 @@ describe('judging', () => {
     expect(usesFormula(check({}))).toBe(false)
     expect(usesFormula(check({ args: [channel, { rpm: 1 }] }))).toBe(true)
     expect(usesFormula(check({ over: { fn: 'sparkAdvanceDeg', args: [channel, { rpm: 1 }] } }))).toBe(true)
+  })
+})
+
+describe('remembering the last answer', () => {
+  const counting = () => {
+    let calls = 0
+    const library = rememberLast({ version: '1', twice: (input: { x: number }) => {
+      calls += 1
+      if (input.x < 0) throw new RangeError('below 0')
+      return 2 * input.x
+    } })
+    const twice = library.twice
+    if (typeof twice !== 'function') throw new Error('no function')
+    return { ask: (x: number): unknown => Reflect.apply(twice, undefined, [{ x }]), calls: () => calls, library }
+  }
+
+  it('asks once for equal arguments, anew for others', () => {
+    const { ask, calls } = counting()
+    expect([ask(1), ask(1), ask(2), ask(1)]).toEqual([2, 2, 4, 2])
+    expect(calls()).toBe(3)
+  })
+
+  it('keeps no error, and what is no function as it is', () => {
+    const { ask, calls, library } = counting()
+    expect(() => ask(-1)).toThrow('below 0')
+    expect(() => ask(-1)).toThrow('below 0')
+    expect(calls()).toBe(2)
+    expect(library.version).toBe('1')
   })
 })
 
