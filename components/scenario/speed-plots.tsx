@@ -3,10 +3,11 @@
 import { memo, useMemo } from 'react'
 import { EquationLink } from '@/components/method/equation-link'
 import { LinePlot } from '@/components/plots/line-plot'
+import { shownNumber } from '@/components/plots/shown-number'
 import type { FigureData } from '@/components/ui/figure-data'
 import type { PartName, Scenario, ScenarioParts } from '@/lib/calc/live'
 import { partEquation } from '@/lib/method/anchors'
-import { formatQuantity, unitOf, type QuantityKind, type UnitSystem } from '@/lib/units'
+import { formatQuantity, unitOf, type UnitSystem } from '@/lib/units'
 import { PartView } from './stale-part'
 
 interface SpeedPlotsProps {
@@ -16,10 +17,6 @@ interface SpeedPlotsProps {
   system: UnitSystem
   name: string
 }
-
-/** A quantity as a bare number in the person's unit: for axes and files. */
-const shownNumber = (value: number, kind: QuantityKind, system: UnitSystem): number =>
-  Number(formatQuantity(value, kind, system, { decimals: 6 }).text.replace('\u2212', '-').replace(/\u202f/g, ''))
 
 /** Every few samples make a table that can be read; the curve keeps them all. */
 const tableEvery = 5

@@ -18,6 +18,7 @@ import { ResultLedgers } from './result-ledgers'
 import { SaveAnswer } from './save-answer'
 import { SheetNotices } from './sheet-notices'
 import type { SheetForm } from './sheet-form'
+import { SparkMapSection } from './spark-map/spark-map-section'
 import { SpeedPlots } from './speed-plots'
 import { TimingDrawings } from './timing-drawings'
 import { useLiveEvaluation } from './use-live-evaluation'
@@ -110,6 +111,7 @@ export function Workbench(props: WorkbenchProps) {
           <FindingsList findings={live.result.findings} staleFindings={live.staleFindings} pendingFindings={live.pendingFindings} system={system} />
           <ResultLedgers parts={shown.parts} stale={live.stale} pending={live.pending} scenario={shownScenario} system={system} />
           <SpeedPlots parts={shown.parts} stale={live.stale} scenario={shownScenario} system={system} name={scenario.code} />
+          <SparkMapSection scenario={shownScenario} parts={shown.parts} pending={live.pending} limits={limits} system={system} name={scenario.code} values={live.values} onChange={edit} />
           <p className="fine">Judged by the program’s default limits, each named beside its finding; they are this shop’s to choose, no authority’s. These figures compare settings of one engine; they clear none for flight: ground-run, then flight-test as your rules and licensed practice say.</p>
         </div>
       </div>
