@@ -42,11 +42,12 @@ const crankingCharge = { pressureKpa: 101.325, temperatureK: 288.15 }
 export function addCycleLayer(scenario: Scenario, closed: ScenarioResult, limits: Limits = defaultLimits): ScenarioResult {
   const ready = readyScenario(scenario)
   const model = part(() => cycleModel(ready))
+  const heard: Notice[] = []
   const standing = <T extends object>(compute: (model: CycleModel) => T): Part<T> => (model.ok ? part(() => compute(model)) : model)
   const cycle: CycleParts = {
     charge: standing((found) => chargePart(scenario, found)),
     detonation: standing((found) => detonationPart(ready, found)),
-    pressure: standing((found) => pressurePart(ready, found)),
+    pressure: standing((found) => pressurePart(ready, found, heard)),
     spark: standing((found) => sparkPart(ready, found)),
   }
   const parts: ScenarioParts = { ...closed.parts, ...cycle }
@@ -55,7 +56,7 @@ export function addCycleLayer(scenario: Scenario, closed: ScenarioResult, limits
     ...closed.findings.filter(({ limitId }) => !isCycleFinding.has(limitId)),
     ...toFindings(cycleDrafts(ready, parts), limits),
   ])
-  const notices = [...closed.notices, ...cycleNotices(scenario, cycle)]
+  const notices = [...closed.notices.filter(({ field }) => !field.startsWith('sheet.cycle')), ...cycleNotices(scenario, cycle, heard)]
   const count = (verdict: string) => findings.filter((finding) => finding.verdict === verdict).length
   const modelSources = cycle.charge.ok ? ['woschni-1967', 'hires-1978', 'gamma-fit'] : []
   return {
@@ -73,8 +74,8 @@ function chargePart({ sheet }: Scenario, { full, volumetricEfficiency, mismatch 
   }
 }
 
-/** Pressures of the cycle at full power on either channel's spark. */
-function pressurePart({ engine, sheet, advance }: ReadyScenario, model: CycleModel): PerChannel<PressureRow> & { rpm: number } {
+/** Pressures of the cycle at full power on either channel's spark; what the cycle had to say beside them is added to `heard`. */
+function pressurePart({ engine, sheet, advance }: ReadyScenario, model: CycleModel, heard: Notice[]): PerChannel<PressureRow> & { rpm: number } {
   const { pressureKpa } = model.full
   const rpm = engine.maxRpm
   const sweep = sweepSparks(compress(checkCycle(model.inputAt(rpm, pressureKpa, 0))))
@@ -82,7 +83,8 @@ function pressurePart({ engine, sheet, advance }: ReadyScenario, model: CycleMod
   const fmepKpa = model.fmepKpa(rpm)
   const bestImepKpa = best ? best.workJ / 1000 / displacementM3(model.engine) : null
   const rowOf = (sparkDeg: number): PressureRow => {
-    const { imepKpa, peakKpa, peakDeg } = simulateCycle({ ...model.inputAt(rpm, pressureKpa, sparkDeg), stepDeg: 0.5, arrays: false })
+    const { imepKpa, peakKpa, peakDeg, notices } = simulateCycle({ ...model.inputAt(rpm, pressureKpa, sparkDeg), stepDeg: 0.5, arrays: false })
+    heard.push(...notices)
     return { imepKpa, peakKpa, peakDeg, torqueRatio: bestImepKpa === null || bestImepKpa <= fmepKpa ? 1 : (imepKpa - fmepKpa) / (bestImepKpa - fmepKpa) }
   }
   return { rpm, ...perChannel((channel) => rowOf(advance(channel, rpm, sheet.manifold.fullKpa))) }
@@ -110,7 +112,11 @@ function sparkPart(scenario: ReadyScenario, model: CycleModel): PerChannel<Spark
   }))
 }
 
-function cycleNotices({ sheet }: Scenario, { charge }: CycleParts): Notice[] {
-  if (!charge.ok || charge.from === 'power') return []
-  return [{ code: 'chargeTyped', severity: 'info', field: 'sheet.cycle.volumetricEfficiency', value: sheet.cycle.volumetricEfficiency ?? 0, limit: `${(100 * charge.mismatch).toFixed(1)} %`, source: 'trade' }]
+/** What a typed charge means, and each kind of thing the cycle said once, at its largest. */
+function cycleNotices({ sheet }: Scenario, { charge, pressure }: CycleParts, heard: readonly Notice[]): Notice[] {
+  const typed: Notice[] = charge.ok && charge.from === 'typed'
+    ? [{ code: 'chargeTyped', severity: 'info', field: 'sheet.cycle.volumetricEfficiency', value: sheet.cycle.volumetricEfficiency ?? 0, limit: `${(100 * charge.mismatch).toFixed(1)} %`, source: 'trade' }]
+    : []
+  const byCode = new Map([...heard].sort((left, right) => left.value - right.value).map((notice) => [notice.code, { ...notice, field: 'sheet.cycle' }]))
+  return [...typed, ...(pressure.ok ? byCode.values() : [])]
 }
