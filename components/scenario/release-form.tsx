@@ -39,7 +39,7 @@ export function ReleaseForm({ title, backHref, outside, system, release }: Relea
         </Section>
       ) : null}
       <Caution>
-        The models compare settings of one engine; they approve none. Ground-run, then flight-test as the rules of your country and licensed practice say.
+        Detonation can destroy an engine in seconds. The models compare settings of one engine; they approve none. Ground-run, then flight-test as the rules of your country and licensed practice say.
       </Caution>
       <p className="acts">
         <Button kind="do" type="submit" pending={pending}>Release the plan</Button>

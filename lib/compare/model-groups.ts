@@ -34,7 +34,7 @@ export function modelGroups(parts: Partial<ScenarioParts>, system: UnitSystem): 
       { id: 'volumetricEfficiency', label: 'Volumetric efficiency', channel: null, kind: 'ratio', value: volumetricEfficiency },
       { id: 'burn', label: 'Burning', channel: null, kind: 'angle', value: durationDeg },
     ]),
-    group('pressure', 'Pressure in the cylinder', parts.pressure, (pressure) => [
+    group('pressure', 'Cylinder pressure', parts.pressure, (pressure) => [
       ...both('peak', 'Peak', 'meanPressure', (channel) => pressure[channel].peakKpa),
       ...both('peakAt', 'Peak after TDC', 'angle', (channel) => pressure[channel].peakDeg),
     ]),

@@ -13,7 +13,9 @@ export function octaneWords(octane: number, scale: unknown, decimals = Number.is
 }
 
 /** What no figure of detonation stands without. */
-export const detonationCaution = 'Detonation can destroy an engine in seconds. The model compares settings of one engine; it clears nothing for flight.'
+export const detonationLead = 'Detonation can destroy an engine in seconds.'
+export const detonationRest = 'The model compares settings of one engine; it clears nothing for flight.'
+export const detonationCaution = `${detonationLead} ${detonationRest}`
 
 /** How well the octane number is known, in words. */
 export const octaneUncertaintyWords = (octane: number, anchored: boolean): string =>

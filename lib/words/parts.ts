@@ -18,7 +18,7 @@ export const partTitle: Record<PartName, string> = {
   stack: 'Tolerance stack',
   charge: 'Charge and burn',
   detonation: 'Detonation',
-  pressure: 'Pressure in the cylinder',
+  pressure: 'Cylinder pressure',
   spark: 'Spark voltage',
 }
 

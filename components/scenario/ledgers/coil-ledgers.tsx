@@ -42,13 +42,13 @@ export function SparkLedger(props: LedgersProps) {
   const { parts, scenario: { engine, sheet }, system } = props
   const q = quantityIn(system)
   return (
-    <PartSection name="spark" part={parts.spark} title={`Spark across ${formatQuantityText(sheet.plugGapMm, 'arc', system)}`} ledgers={props}>
+    <PartSection name="spark" part={parts.spark} title="Spark voltage" ledgers={props}>
       {({ primary, backup }) => {
         const share = [...new Set(channels.map((channel) => formatQuantityText(sheet.coils[channel].transferEfficiency, 'percent', system)))].join(' and ')
         return (
           <>
             <Ledger
-              caption="Spark voltage asked for and offered on each channel" columns={[{ head: 'voltage' }, ...channelHeads.slice(1)]}
+              caption="Spark voltage asked for and offered on each channel" columns={[{ head: `across ${formatQuantityText(sheet.plugGapMm, 'arc', system)}` }, ...channelHeads.slice(1)]}
               rows={[
                 { key: 'demand', cells: [`Asked for at ${formatQuantityText(engine.maxRpm, 'engineSpeed', system)}`, q(primary.demandKv, 'voltageKv'), q(backup.demandKv, 'voltageKv')] },
                 { key: 'offer', cells: ['Offered', q(primary.offeredKv, 'voltageKv'), q(backup.offeredKv, 'voltageKv')] },

@@ -37,7 +37,7 @@ export function PressureLedger(props: LedgersProps) {
   const { parts, system } = props
   const q = quantityIn(system)
   return (
-    <PartSection name="pressure" part={parts.pressure} title="Pressure in the cylinder" ledgers={props}>
+    <PartSection name="pressure" part={parts.pressure} title="Cylinder pressure" ledgers={props}>
       {({ rpm, primary, backup }) => (
         <>
           <Ledger

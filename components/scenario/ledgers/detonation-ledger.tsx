@@ -1,5 +1,5 @@
-import { Caution } from '@/components/ui/caution'
 import { ChannelChip } from '@/components/ui/channel-chip'
+import { DetonationCaution } from '@/components/ui/detonation-caution'
 import { Ledger } from '@/components/ui/ledger'
 import { ScrollBox } from '@/components/ui/scroll-box'
 import type { DetonationCases, DetonationPoint, ScenarioSheet } from '@/lib/calc/live'
@@ -51,7 +51,7 @@ export function DetonationLedger(props: LedgersProps) {
         const cost = (value: number | null) => (value === null ? 'none found' : q(value, 'angle'))
         return (
           <>
-            <Caution lead="Detonation can destroy an engine in seconds.">The model compares settings of one engine; it clears nothing for flight.</Caution>
+            <DetonationCaution />
             <ScrollBox label="Detonation margins">
               <Ledger
                 className="wide" caption="Spark, detonation limit and margin of each channel as planned, worse than planned and at altitude"

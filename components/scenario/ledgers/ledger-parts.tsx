@@ -47,7 +47,7 @@ interface PartSectionProps<T> {
 export function PartSection<T>({ name, part, title, ledgers: { stale, pending, isSaved }, children }: PartSectionProps<T>) {
   const isPending = pending?.has(name) ?? false
   return (
-    <Section title={title} level={3} right={<>{isPending && (part.ok || part.error.code !== 'notComputed') ? <span className="again-word">being computed again</span> : null} {equationOf(name)}</>}>
+    <Section title={title} level={3} right={<>{isPending && (part.ok || part.error.code !== 'notComputed') ? <span className="again-word">computing<span className="sr"> again, these are the last figures</span></span> : null} {equationOf(name)}</>}>
       <PartView name={name} part={part} stale={stale.has(name)} pending={isPending} isSaved={isSaved}>{children}</PartView>
     </Section>
   )

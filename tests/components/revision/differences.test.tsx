@@ -43,6 +43,13 @@ describe('results', () => {
     expect(cellsOf(/^Timing marks at least/)).toEqual(['1.48\u00a0mm/°', '1.48\u00a0mm/°', 'same'])
   })
 
+  test('a margin to detonation and a chance stand with their spread, under the caution', () => {
+    render(<ResultDifferences left={base.results} right={early.results} columns={columns} system="metric" />)
+    expect(screen.getByRole('note')).toHaveTextContent(/can destroy an engine in seconds.*clears nothing for flight/)
+    expect(cellsOf(/^B ?backup Margin to detonation/)[0]).toMatch(/° .+ for 5 octane less$/)
+    expect(cellsOf(/^No spark at all/)[0]).toMatch(/\/h \d\.\d·10⁻.* to \d\.\d·10⁻/)
+  })
+
   test('a figure that one side withholds says so', () => {
     render(<ResultDifferences left={base.results} right={sampleRevision(3, { plugsPerCylinder: 2 }).results} columns={columns} system="metric" />)
     expect(cellsOf(/^A ?primary Power$/)).toEqual([expect.stringMatching(/kW$/), 'withheld', 'changed'])
