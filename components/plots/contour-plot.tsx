@@ -7,7 +7,7 @@ import { useWidth } from '@/components/ui/use-width'
 import { formatNumber } from '@/lib/units'
 import { ContourCurves } from './contour-curves'
 import { contourLines, regionOutlines, type PlotGrid, type PlotXY } from './contour-lines'
-import { placeLabels, textBox, type Box } from './label-room'
+import { lengthOf, placeLabels, textBox, type Box } from './label-room'
 import { placeNotes, pointBox, PlotPoints, type PlotPlace } from './plot-points'
 import { decimalsOf, niceStep, ticksIn, xPixel, yPixel, type PlotArea } from './scale'
 
@@ -38,6 +38,7 @@ export interface ContourPlotProps {
 }
 
 const servedWidth = 620
+const shortestLinePx = 30
 const none: readonly [] = []
 
 const finite = (values: PlotGrid['values']): number[] => values.flatMap((row) => row.filter((value) => value !== null))
@@ -50,18 +51,20 @@ export function ContourPlot({ title, level, sentence, finding, grid, labelUnit, 
   const hatch = useId()
   const drawn = useMemo(() => {
     const area: PlotArea = { width, height: isNarrow ? 330 : 420, left: 44, right: 44, top: 10, bottom: 24 }
-    const domain = (axis: readonly number[], most: number) => {
+    const domain = (axis: readonly number[], most: number, room: number) => {
       const [from, to] = [axis[0] ?? 0, axis.at(-1) ?? 1]
-      return { from, to, step: niceStep(to - from, most) }
+      // A point at an end of the axis stands clear of its numbers.
+      return { from: from - room * (to - from), to: to + room * (to - from), step: niceStep(to - from, most) }
     }
-    const x = domain(grid.x, isNarrow ? 4 : 7)
-    const y = domain(grid.y, 6)
+    const x = domain(grid.x, isNarrow ? 4 : 7, isNarrow ? 0.06 : 0.035)
+    const y = domain(grid.y, 6, 0.015)
     const known = finite(grid.values)
     const [low, high] = [Math.min(...known), Math.max(...known)]
-    const step = Math.max(0.5, niceStep(high - low, isNarrow ? 6 : 10))
+    const step = Math.max(0.5, niceStep(high - low, isNarrow ? 11 : 14))
     const levels = known.length > 0 ? ticksIn({ from: low, to: high }, step) : []
     const toPixel = (point: PlotXY): PlotXY => ({ x: xPixel(area, x, point.x), y: yPixel(area, y, point.y) })
-    const lines = contourLines(grid, levels)
+    // Scraps between two places without a value say nothing and take no label.
+    const lines = contourLines(grid, levels).filter(({ points }) => lengthOf(points.map(toPixel)) > shortestLinePx)
     const frame: Box = { x: area.left + 2, y: area.top + 2, width: area.width - area.left - area.right - 4, height: area.height - area.top - area.bottom - 4 }
     const hatched = regions.flatMap(({ words, isIn }) => {
       const outlines = regionOutlines(grid, isIn).map((ring) => ring.map(toPixel))

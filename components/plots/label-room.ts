@@ -31,10 +31,12 @@ const shortestPx = 46
 
 const distance = (one: PlotXY, other: PlotXY) => Math.hypot(one.x - other.x, one.y - other.y)
 
+export const lengthOf = (points: readonly PlotXY[]): number => points.slice(1).reduce((sum, point, k) => sum + distance(points[k] ?? point, point), 0)
+
 /** Places on a line from its middle outwards, both ends left free. */
 function spotsOn(points: readonly PlotXY[]): PlotXY[] {
   const lengths = points.slice(1).map((point, k) => distance(points[k] ?? point, point))
-  const whole = lengths.reduce((sum, length) => sum + length, 0)
+  const whole = lengthOf(points)
   if (whole < shortestPx) return []
   const at = (way: number): PlotXY => {
     let left = way

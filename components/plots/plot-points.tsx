@@ -18,7 +18,7 @@ export interface PlacedPlace extends PlotPlace {
 
 const letterPx = 7
 const rowPx = 17
-const gapPx = 15
+const gapPx = 21
 
 const boxesOf = (place: PlotPlace): { box: Box, anchor: 'start' | 'end' }[] => {
   const width = Math.max(place.name.length * letterPx, ...place.marks.map(({ text }) => (text.length + 2) * letterPx + 6))

@@ -13,7 +13,7 @@ export function mapTable({ map, pressures }: DrawnMap, view: MapView, system: Un
   const words = (place: number | 'never' | 'always') => (typeof place === 'number' ? place : placeLongWords[place])
   return {
     caption: `${viewTitle[view]} in degrees before top dead centre: speed in rpm down, charge pressure at inlet closing across`,
-    columns: [{ head: 'Speed' }, ...map.pressureKpa.map((kpa) => ({ head: shown(kpa), unit: symbol, decimals: 1 }))],
+    columns: [{ head: 'Speed', unit: 'rpm' }, ...map.pressureKpa.map((kpa) => ({ head: shown(kpa), unit: symbol, decimals: 1 }))],
     rows: [
       ['in the manifold', ...map.pressureKpa.map((chargeKpa) => shown(manifoldKpaFromCharge({ chargeKpa, ...pressures })))],
       ...placesOf(map, view).map((row, i) => [map.rpm[i] ?? 0, ...row.map(words)]),

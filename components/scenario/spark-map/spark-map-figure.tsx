@@ -40,7 +40,7 @@ export const SparkMapFigure = memo(function SparkMapFigure({ drawn, points, syst
     name: word, x: rpm, y: shownNumber(pressureKpa, 'pressure', system), marks: sparks.map(({ channel, deg }) => ({ channel, text: formatQuantityText(deg, 'angle', system) })),
   })), [points, system])
   return (
-    <>
+    <div className="map-drawing">
       <ChoiceStrip label="What is drawn" choices={views} value={view} onChoose={setView} />
       <ContourPlot
         title={`${viewTitle[view]}, degrees before TDC`} level={3} csvName={`${name}-map-${view}`}
@@ -48,6 +48,6 @@ export const SparkMapFigure = memo(function SparkMapFigure({ drawn, points, syst
         {...drawing} border={border} places={places} labelUnit="°" xUnit="rpm" data={data}
         yTitle={`charge at inlet closing, ${symbol}`} beside={{ title: `in the manifold, ${symbol}`, perY: pressures.fullManifoldKpa / pressures.fullChargeKpa }}
       />
-    </>
+    </div>
   )
 })

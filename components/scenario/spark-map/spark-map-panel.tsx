@@ -72,7 +72,7 @@ function MapOnPage({ drawn, old, scenario, parts, system, name }: MapOnPageProps
       <SparkMapFigure drawn={drawn} points={points} system={system} name={name} />
       <MapPointsLedger drawn={drawn} points={points} system={system} />
       <p className="fine">
-        With {dayWords(drawn.scenario.sheet, drawn.day, system)}. The points stand where the sheet’s manifold pressures put them{drawn.day === 'worse' && scenario.sheet.worse.denserKpa > 0 ? `, ${pressure(scenario.sheet.worse.denserKpa)} denser` : ''}; beside the dotted line detonation takes over from best torque.
+        With {dayWords(drawn.scenario.sheet, drawn.day, system)}. The points stand where the sheet’s manifold pressures put them{drawn.day === 'worse' && scenario.sheet.worse.denserKpa > 0 ? `, ${pressure(scenario.sheet.worse.denserKpa)} denser` : ''}. Above the dotted line detonation sets the spark, below it best torque.
         {' '}Burn angles follow speed to the power ⅓ and charge to the power −¼ from full power: from memory, not read. Charge at inlet closing is not manifold pressure: {pressure(fullManifoldKpa)} in the manifold is {pressure(fullChargeKpa)} of charge at full throttle, and the rest is taken in proportion.
       </p>
     </div>
