@@ -7,6 +7,7 @@ import { octaneExponent } from '../cycle/prepare-cycle'
 import { sparkGrid } from '../cycle/spark-grid'
 import { compress, searchedFromDeg, searchedToDeg, sweepSparks, type SparkPoint, type SparkSweep } from '../cycle/spark-sweep'
 import type { CarriedPoint, CycleModel } from './cycle-model'
+import { lookedSpeeds } from './looked-speeds'
 import { withheld } from './part'
 import type { ChannelName, DetonationPoint, DetonationRow, PartFigures, PerChannel } from './result-types'
 import type { ReadyScenario } from './ready-scenario'
@@ -17,8 +18,6 @@ const octaneUncertainty = 5
 const anchoredUncertainty = 1
 /** A typed charge may miss the power by this share. */
 const mismatchAllowed = 0.05
-/** Speeds looked at from half of full power up. */
-const speeds = 6
 
 /** One charge at any spark and octane: the integral scales with the octane number, so one grid serves all. */
 interface ChargeState {
@@ -47,7 +46,7 @@ export function refuseMismatch({ mismatch }: CycleModel): void {
 }
 
 export function detonationPart(scenario: ReadyScenario, model: CycleModel): PartFigures<'detonation'> {
-  const { sheet, engine } = scenario
+  const { sheet } = scenario
   refuseMismatch(model)
   const stateAt = (rpm: number, pressureKpa: number, hotterK: number): ChargeState => {
     const sweep = sweepAt(model, rpm, pressureKpa, hotterK)
@@ -78,9 +77,8 @@ export function detonationPart(scenario: ReadyScenario, model: CycleModel): Part
     worse: { hotterK: sheet.worse.hotterK, denserKpa: sheet.worse.denserKpa, lapse: 1, octane: sheet.fuel.worseOctane },
     altitude: { hotterK: 0, denserKpa: 0, lapse: lapseOf(scenario), octane: sheet.fuel.octane },
   }
-  const fromRpm = Math.max(engine.idleRpm, engine.maxRpm / 2)
-  const looked = Array.from({ length: speeds }, (_, i) => {
-    const carried = model.carriedAt(i === speeds - 1 ? engine.maxRpm : fromRpm + ((engine.maxRpm - fromRpm) * i) / (speeds - 1))
+  const looked = lookedSpeeds(scenario).map((rpm) => {
+    const carried = model.carriedAt(rpm)
     const spark = perChannel((channel) => scenario.advance(channel, carried.rpm, sheet.manifold.fullKpa))
     const at = (name: keyof typeof cases): PerChannel<DetonationPoint> & { pressureKpa: number } => {
       const { hotterK, denserKpa, lapse, octane } = cases[name]

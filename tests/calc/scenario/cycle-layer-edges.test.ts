@@ -77,6 +77,21 @@ describe('detonation', () => {
   })
 })
 
+test('a top of the schedule between the even speeds is looked at: the margin is least there', () => {
+  const peakAt = (rpm: number) => ({ schedule: { kind: 'table' as const, points: [{ rpm: rpm - 120, deg: 14 }, { rpm, deg: 27 }, { rpm: rpm + 120, deg: 14 }] }, latencyUs: 0 })
+  const held: ScenarioSheet['propeller'] = { kind: 'constantSpeed', governedRpm: 2700, pitches: [{ name: 'fine', rpm: 2780, kw: 49.3 }] }
+  // 1946 and 2224 are even speeds, 2085 and 2641 lie between. A fixed pitch leaves the engine throttled but near full speed.
+  for (const [rpm, propeller] of [[1946, held], [2085, held], [2641, sampleSheet().propeller]] as const) {
+    const { primary, backup } = got(evaluateScenario(scenario({}, { propeller, primary: peakAt(rpm) })).parts.detonation)
+    expectClose(primary.worse.rpm, rpm, { abs: 10 })
+    expectClose(primary.worse.sparkDeg, 27, { abs: 1.1 })
+    expect(Math.abs(backup.worse.rpm - rpm)).toBeGreaterThan(100)
+  }
+  // The charge of a throttled engine follows the primary; at full throttle it is the same for both.
+  const margin = (sheet: Partial<ScenarioSheet>, channel: 'primary' | 'backup') => got(evaluateScenario(scenario({}, { propeller: held, ...sheet })).parts.detonation)[channel].worse.marginDeg ?? NaN
+  expectClose(margin({ backup: peakAt(2085) }, 'backup'), margin({ primary: peakAt(2085) }, 'primary'), { abs: 1e-9 })
+})
+
 describe('spark and pressure', () => {
   const plain = scenario()
   const { charge, spark, pressure } = evaluateScenario(plain).parts
