@@ -87,6 +87,36 @@ describe('crankTorque', () => {
     }
   })
 
+  describe('outside the closed cycle', () => {
+    const { engine, charge } = sampleCycle()
+    const alone = (changes: Partial<CrankTorqueInput> = {}) => torque({ firingSchedule: [{ cylinder: 1, atDeg: 0 }], reciprocatingMassKg: 0, ...changes }).torqueNm
+    const area = (Math.PI / 4) * (engine.boreMm / 1000) ** 2
+    /** Torque of one kPa on the piston at a crank angle, by a difference of the travel. */
+    const leverage = (deg: number) => {
+      const travel = (t: number) => (engine.strokeMm / 2000) * (1 - Math.cos(t)) + engine.rodMm / 1000 - Math.sqrt((engine.rodMm / 1000) ** 2 - ((engine.strokeMm / 2000) * Math.sin(t)) ** 2)
+      const [t, h] = [(deg * Math.PI) / 180, 1e-4]
+      return (1000 * area * (travel(t + h) - travel(t - h))) / (2 * h)
+    }
+
+    it('exhausting up to the top, drawing in from there to inlet closing', () => {
+      const at = alone({ exhaustKpa: 110, crankcaseKpa: 100, intakeKpa: 70 })
+      for (const deg of [117, 200, 300, 359]) expectClose(at[deg], 10 * leverage(deg), { rel: 1e-6 })
+      for (const deg of [361, 420, 597]) expectClose(at[deg], -30 * leverage(deg), { rel: 1e-6 })
+    })
+
+    it('the pressures left out: outside air, and the charge’s own while drawing in', () => {
+      const at = alone()
+      expectClose(at[300], 0, { abs: 1e-9 })
+      expectClose(at[450], (charge.pressureKpa - 101.325) * leverage(450), { rel: 1e-6 })
+    })
+
+    it('0 is where the first of the schedule fires, whatever its angle', () => {
+      const shifted = six.map(({ cylinder, atDeg }) => ({ cylinder, atDeg: (atDeg + 90) % 720 }))
+      const [plain, moved] = [torque({ dead: [2] }).torqueNm, torque({ firingSchedule: shifted, dead: [2] }).torqueNm]
+      moved.forEach((value, angle) => expectClose(value, plain[angle] ?? NaN, { abs: 1e-9 }))
+    })
+  })
+
   it('refuses a schedule with a cylinder twice, a dead one that is not in it, and a bad pressure', () => {
     expectCalcError(() => torque({ firingSchedule: [{ cylinder: 1, atDeg: 0 }, { cylinder: 1, atDeg: 360 }] }), 'firingSchedule.1.cylinder')
     expectCalcError(() => torque({ firingSchedule: [] }), 'firingSchedule')

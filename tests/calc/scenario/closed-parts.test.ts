@@ -1,5 +1,5 @@
 import { describe, expect, test } from 'vitest'
-import { deadCylinderPower, evaluateClosedForms, powerAtDensityRatio, standardAtmosphere, type Engine, type Part, type Scenario, type ScenarioSheet } from '@/lib/calc'
+import { combineUncertainty, deadCylinderPower, evaluateClosedForms, powerAtDensityRatio, standardAtmosphere, type Engine, type Part, type Scenario, type ScenarioSheet } from '@/lib/calc'
 import { curvePowerKw, frictionPowerAt, timingRatioOf } from '@/lib/calc/scenario/power-parts'
 import { readyScenario } from '@/lib/calc/scenario/ready-scenario'
 import { deepFreeze } from '@/tests/support/deep-freeze'
@@ -127,4 +127,10 @@ describe('redundancy', () => {
     const finding = findings.find(({ id }) => id === 'noSparkPerH')
     expect([finding?.value, finding?.data.lowPerHour, finding?.data.highPerHour]).toEqual([row?.perHour, row?.lowPerHour, row?.highPerHour])
   })
+})
+
+test('between the channels of one unit bench and scatter count once for each; setting and mark are the same for both', () => {
+  const bench = { value: 0.5, distribution: 'rectangular' as const }
+  const scatter = { value: 0.3, distribution: 'normal' as const }
+  expectClose(got(evaluateClosedForms(scenario()).parts.stack).staggerExpandedDeg, combineUncertainty([bench, bench, scatter, scatter]).expanded, { rel: 1e-12 })
 })
