@@ -29,7 +29,7 @@ export function modelGroups(parts: Partial<ScenarioParts>, system: UnitSystem): 
       { id: 'gainDeg', label: 'Gained by going to the backup', channel: null, kind: 'angle', value: detonation.gainDeg, signed: true },
       { id: 'gainOctane', label: 'Gained by going to the backup, octane numbers', channel: null, kind: 'octane', value: detonation.gainOctane, signed: true },
     ]),
-    group('charge', 'Charge and burn', parts.charge, ({ pressureKpa, volumetricEfficiency, durationDeg }) => [
+    group('charge', 'Charge at full power', parts.charge, ({ pressureKpa, volumetricEfficiency, durationDeg }) => [
       { id: 'charge', label: 'Charge at inlet closing', channel: null, kind: 'pressure', value: pressureKpa },
       { id: 'volumetricEfficiency', label: 'Volumetric efficiency', channel: null, kind: 'ratio', value: volumetricEfficiency },
       { id: 'burn', label: 'Burning', channel: null, kind: 'angle', value: durationDeg },

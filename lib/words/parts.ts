@@ -16,7 +16,7 @@ export const partTitle: Record<PartName, string> = {
   climb: 'Climb',
   redundancy: 'Chances of losing the spark',
   stack: 'Tolerance stack',
-  charge: 'Charge and burn',
+  charge: 'Charge at full power',
   detonation: 'Detonation',
   pressure: 'Cylinder pressure',
   spark: 'Spark voltage',

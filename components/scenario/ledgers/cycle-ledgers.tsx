@@ -7,7 +7,7 @@ export function ChargeLedger(props: LedgersProps) {
   const { parts, system } = props
   const q = quantityIn(system)
   return (
-    <PartSection name="charge" part={parts.charge} title="Charge and burn" ledgers={props}>
+    <PartSection name="charge" part={parts.charge} title="Charge at full power" ledgers={props}>
       {({ rpm, powerKw, pressureKpa, volumetricEfficiency, from, mismatch, delayDeg, durationDeg, mbtDeg }) => (
         <>
           <Ledger

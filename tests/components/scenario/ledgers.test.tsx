@@ -68,10 +68,10 @@ describe('detonation', () => {
 describe('the other ledgers', () => {
   test('the charge says whether it was solved or typed', () => {
     show()
-    expect(region('Charge and burn')).toHaveTextContent(/Solved: with this charge the cycle makes the 50\.0.kW of the power curve/)
+    expect(region('Charge at full power')).toHaveTextContent(/Solved: with this charge the cycle makes the 50\.0.kW of the power curve/)
     if (!parts.charge.ok) throw new Error('the sample has a charge')
     show({ change: { charge: { ...parts.charge, from: 'typed', mismatch: -0.031 } } })
-    expect(screen.getAllByRole('region', { name: 'Charge and burn' })[1]).toHaveTextContent(/Typed as volumetric efficiency; the charge makes 3\.1.% less/)
+    expect(screen.getAllByRole('region', { name: 'Charge at full power' })[1]).toHaveTextContent(/Typed as volumetric efficiency; the charge makes 3\.1.% less/)
   })
 
   test('coils: stored energy says that half of it arrives; a winding that runs away is said', () => {
@@ -119,7 +119,7 @@ describe('the other ledgers', () => {
 
   test('each head leads to its equation', () => {
     show()
-    for (const name of ['Detonation', 'Charge and burn', 'Cylinder pressure', 'Coils', 'Chances of losing the spark', 'Tolerance stack'])
+    for (const name of ['Detonation', 'Charge at full power', 'Cylinder pressure', 'Coils', 'Chances of losing the spark', 'Tolerance stack'])
       expect(within(region(name)).getByRole('link', { name: /^equation ?of/ })).toHaveAttribute('href', expect.stringMatching(/^\/method#./))
   })
 })
