@@ -1,8 +1,11 @@
+import AxeBuilder from '@axe-core/playwright'
 import { expect, test } from '@playwright/test'
 import { pageOf, watch } from './support/people'
 import { field, newScenario, saveSheet } from './support/sheet'
 
 test('a map of spark is computed, cancelled, computed, read as a table, copied into the backup and saved', async ({ browser }) => {
+  // Three maps are computed: on a busy machine that takes its time.
+  test.slow()
   const page = await pageOf(browser, 'designer')
   const clean = watch(page)
   const path = await newScenario(page, 'Mapped spark')
@@ -32,6 +35,7 @@ test('a map of spark is computed, cancelled, computed, read as a table, copied i
   await expect(panel.getByText('The map is drawn.')).toBeVisible()
   await expect(panel.getByRole('img', { name: /Spark over speed and charge pressure as contour lines/ })).toBeVisible()
   await expect(panel.getByText(/^Of 30 places best torque sets the spark at/)).toBeVisible()
+  expect((await new AxeBuilder({ page }).include('.map-panel').analyze()).violations).toEqual([])
   await panel.getByRole('button', { name: 'Detonation limit' }).click()
   await panel.getByRole('button', { name: 'Detonation limit' }).press('t')
   await expect(panel.getByText(/Coming from late sparks detonation begins at/)).toBeVisible()

@@ -43,7 +43,7 @@ const show = (options?: Show) => {
   return { onUse, again: (next: Show) => rerender(panelOf(onUse, next)), unmount }
 }
 const press = (name: RegExp | string) => userEvent.click(screen.getByRole('button', { name }))
-const draw = async (given = answer) => {
+const draw = async (given: SparkMapAnswer = answer) => {
   await press('Compute the map')
   await act(async () => lastRun().answer(given))
 }
