@@ -3,8 +3,8 @@ import { expect, test, type Page } from '@playwright/test'
 import { pageOf, watch } from './support/people'
 
 async function judge(page: Page): Promise<void> {
-  // Formulas have no rule of their own, and their thousands of parts in one ink take minutes to compare.
-  const { violations } = await new AxeBuilder({ page }).exclude('math').withTags(['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa', 'best-practice']).analyze()
+  // Formulas have no rule of their own, and their thousands of parts in one ink would take the longest.
+  const { violations } = await new AxeBuilder({ page }).options({ resultTypes: ['violations'] }).exclude('math').withTags(['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa', 'best-practice']).analyze()
   expect(violations.map(({ id, nodes }) => `${id}: ${nodes.slice(0, 3).map((node) => node.target.join(' ')).join(' | ')}`)).toEqual([])
 }
 
@@ -49,7 +49,11 @@ for (const colorScheme of ['light', 'dark'] as const) {
     const clean = watch(page)
     for (const path of ['/', '/method', '/sign-in', '/sign-up', '/nowhere']) {
       await page.goto(path)
-      if (path === '/method') await page.locator('.summary[data-done]').waitFor()
+      if (path === '/method') {
+        await page.locator('.summary[data-done]').waitFor()
+        // The whole of it once; in the other theme the first topics, which hold every kind of piece: it is the longest page of all.
+        if (colorScheme === 'dark') await page.locator('.mtopic').evaluateAll((topics) => topics.slice(4).forEach((topic) => topic.remove()))
+      }
       await test.step(path, () => judge(page))
     }
     await page.goto('/sign-in')
