@@ -71,6 +71,10 @@ const list: readonly Source[] = [
   { id: 'nist-misra1a', author: 'National Institute of Standards and Technology', title: 'Statistical Reference Datasets, Misra1a', year: null, provenance: 'read', use: 'Certified values of a curve of the form of a coil’s current' },
   { id: 'iec-60085', author: 'International Electrotechnical Commission', title: 'IEC 60085, Electrical insulation: thermal evaluation and designation', year: null, provenance: 'memory', use: 'Temperature of insulation class F, 155 °C' },
   { id: 'ac-23-1309-1e', author: 'Federal Aviation Administration', title: 'AC 23.1309-1E, System safety analysis and assessment for Part 23 airplanes', year: null, provenance: 'memory', use: 'Orders of magnitude for failure conditions of small single-engine aeroplanes, for orientation; read second-hand' },
+  { id: 'far-33-37', author: 'Code of Federal Regulations', title: '14 CFR 33.37, Ignition system', year: null, provenance: 'read', use: 'What a certificated engine has for redundancy: shown, not computed' },
+  { id: 'far-91-319', author: 'Code of Federal Regulations', title: '14 CFR 91.319 and Part 43 Appendix D', year: null, provenance: 'read', use: 'Flight area and condition inspection of experimental aircraft: shown, not computed' },
+  { id: 'ac-43-13-1b', author: 'Federal Aviation Administration', title: 'AC 43.13-1B, Acceptable methods, techniques, and practices, 8-2a', year: null, provenance: 'read', use: 'How a cold cylinder is found: shown, not computed' },
+  { id: 'faa-powerplant', author: 'Federal Aviation Administration', title: 'Aviation Maintenance Technician Handbook, Powerplant', year: null, provenance: 'read', use: 'Usual drop of a magneto: shown, not computed' },
   { id: 'trade', author: 'the trade', title: 'Common practice', year: null, provenance: 'common practice', use: 'Facts of the trade without a published source' },
 ]
 

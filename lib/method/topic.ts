@@ -30,6 +30,8 @@ export interface Topic {
   /** Names in the calculation library that it explains; a published check stands under the topic of the function it calls. */
   readonly functions: readonly string[]
   readonly equations: readonly Equation[]
+  /** What handbooks and rules say beside it: shown, not computed. */
+  readonly handbook?: readonly { readonly says: string, readonly source: string }[]
   /** Where the model is known to be wrong or blind. */
   readonly weaknesses: readonly string[]
 }

@@ -29,6 +29,11 @@ export const checks = defineTopic({
       sources: ['trade'],
     },
   ],
+  handbook: [
+    { says: 'With two plugs in a cylinder a drop of 25 to 75 rpm, even on both sides, is usual; aeroplane handbooks allow up to 125 to 175 and 50 between the sides. With one plug in a cylinder these figures do not hold, and the aircraft’s own govern.', source: 'faa-powerplant' },
+    { says: 'No drop at all points to a channel that is still live when it is switched off, or to one timed early.', source: 'faa-powerplant' },
+    { says: 'A condition inspection within 12 calendar months comes from the aircraft’s operating limitations, to the scope of Part 43 Appendix D; the entry carries date, total time, name, signature and certificate. The rules where the aircraft flies govern.', source: 'far-91-319' },
+  ],
   weaknesses: [
     'A light shows the spark it is clipped to. Crossfire and a swapped lead look like good timing.',
     'Wind, oil temperature and a tachometer’s own error move a run-up by as much as a degree of timing does.',

@@ -49,6 +49,9 @@ export const deadCylinders = defineTopic({
       sources: ['x-engineer'],
     },
   ],
+  handbook: [
+    { says: 'A cold cylinder is found by touch after a short run on the channel that fails; swapping plugs tells a plug from a lead. Ignition off and supply disconnected before hands go in.', source: 'ac-43-13-1b' },
+  ],
   weaknesses: [
     'Friction is taken as unchanged when a cylinder goes cold. In truth its rings and bearings carry less, and it pumps and leaks more.',
     'The friction curve is that of car engines with water cooling and belts; an air-cooled aircraft engine differs. The engine’s own figure at rated power sets its height here, the curve its shape.',

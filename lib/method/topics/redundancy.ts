@@ -68,6 +68,11 @@ export const redundancy = defineTopic({
       sources: ['birnbaum-1969', 'fault-tree-examples'],
     },
   ],
+  handbook: [
+    { says: 'Certificated spark-ignition engines have two ignitions: two plugs in a cylinder on two circuits with supplies of their own, or something as reliable in flight.', source: 'far-33-37' },
+    { says: 'For orientation, a small single-engine aeroplane, per flight hour: minor 1e-3, major 1e-4, hazardous 1e-5, catastrophic 1e-6. Homebuilts are not certificated to it.', source: 'ac-23-1309-1e' },
+    { says: 'An experimental aircraft stays in an area assigned to it until it is shown to be controllable.', source: 'far-91-319' },
+  ],
   weaknesses: [
     'No failure rates of these parts are published for this use. A result is good to a factor of ten; the table of sensitivities shows which guesses carry it.',
     'Only what was drawn can fail: a wrong lead, a forgotten switch, water and people are in no tree unless somebody puts them there.',

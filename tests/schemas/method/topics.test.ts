@@ -80,3 +80,8 @@ describe.each(someCases(equations))('$id', ({ tex, symbols, sources: ids, basis 
     expect(ids.length > 0 || basis !== undefined).toBe(true)
   })
 })
+
+it.each(someCases(topics.flatMap((topic) => ('handbook' in topic ? topic.handbook.map((fact) => ({ id: topic.id, ...fact })) : []))))('$id: what a handbook says names its source: $says', ({ says, source }) => {
+  expect(calc.sources[source]?.provenance).toBeDefined()
+  expect(says).toMatch(/[.]$/)
+})
