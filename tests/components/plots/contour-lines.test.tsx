@@ -36,6 +36,13 @@ describe('lines of equal value', () => {
     expect(contourLines(hill, [11, 1])).toEqual([])
   })
 
+  test('are one run each, whichever side of the frame cuts them', () => {
+    const axis = [0, 1, 2, 3, 4]
+    for (const [left, low] of [[0, 2], [4, 2], [2, 0], [2, 4], [0, 0]] as const) {
+      expect(contourLines(gridOf(axis, axis, (at, up) => -((at - left) ** 2) - (up - low) ** 2), [-1.5])).toHaveLength(1)
+    }
+  })
+
   test('end beside a place without a value, and are drawn on its other side', () => {
     const withHole = gridOf([0, 1, 2, 3, 4, 5], [0, 1, 2], (at, up) => (at === 2 && up === 1 ? null : up))
     const runs = contourLines(withHole, [0.5]).map(({ points }) => points.map((point) => point.x).sort((one, other) => one - other))
