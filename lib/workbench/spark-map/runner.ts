@@ -60,6 +60,8 @@ export function runSparkMap(request: SparkMapRequest, { onProgress, signal }: Ru
     }
     // Its script did not load, or it broke: the page does it.
     worker.onerror = () => {
+      // Ended while its script was on the way, a worker reports that as a fault.
+      if (signal.aborted) return
       end()
       resolve(inPage())
     }

@@ -40,13 +40,14 @@ describe('a run of the map', () => {
   })
 
   test('stopped, it ends its worker at once, rejects with the reason and is not heard of again', async () => {
-    const { worker, stop, onProgress, run } = setUp()
+    const { worker, stop, onProgress, run, computeHere } = setUp()
     const done = run()
     stop.abort('person')
     await expect(done).rejects.toBe('person')
     expect(worker.isEnded).toBe(true)
     worker.say({ progress: { done: 1, total: 2 } })
-    expect(onProgress).not.toHaveBeenCalled()
+    worker.fail()
+    expect([onProgress.mock.calls, computeHere.mock.calls]).toEqual([[], []])
     await expect(run()).rejects.toBe('person')
     expect(worker.asked).toHaveLength(1)
   })
