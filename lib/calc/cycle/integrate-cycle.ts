@@ -26,27 +26,17 @@ export interface Recorder {
   readonly step: (thetaDeg: number, pressureKpa: number, kelvin: number, slopeAtStart: number, slopeAtEnd: number, workJ: number, heatLossJ: number, knock: number) => void
 }
 
-/** Quantities at the ends and the middle of every step of a segment: index 2i is the start of step i, 2i + 1 its middle. */
-export interface Nodes {
-  /** 1/V, 1/m³. */
-  readonly inverse: Float64Array
-  /** dV/dθ, m³ per degree. */
-  readonly spread: Float64Array
-  /** V/(mR), K/Pa. */
-  readonly warmth: Float64Array
-  /** J/degree for 1 kPa^0.25, 1 (m/s)^0.8 and 1 K. */
-  readonly cooling: Float64Array
-  readonly motoredKpa: Float64Array
-  /** J per degree. */
-  readonly release: Float64Array
-}
+/**
+ * Quantities at the ends and the middle of every step of a segment, six to a node in one list: node 2i is the start of step i, 2i + 1 its middle.
+ * 1/V in 1/m³ · dV/dθ in m³ per degree · V/(mR) in K/Pa · wall heat in J/degree for 1 kPa^0.25, 1 (m/s)^0.8 and 1 K · motored pressure in kPa · heat release in J per degree
+ */
+export type Nodes = Float64Array
+const perNode = 6
+const [inverseAt, spreadAt, warmthAt, coolingAt, motoredAt, releaseAt] = [0, 1, 2, 3, 4, 5] as const
 
 const degree = Math.PI / 180
 
-export const makeNodes = (steps: number): Nodes => {
-  const list = () => new Float64Array(2 * steps + 1)
-  return { inverse: list(), spread: list(), warmth: list(), cooling: list(), motoredKpa: list(), release: list() }
-}
+export const makeNodes = (steps: number): Nodes => new Float64Array(perNode * (2 * steps + 1))
 
 /** Sine and cosine are carried on by the theorem of addition and taken anew every so many nodes, so that rounding cannot add up. */
 const renewEvery = 128
@@ -75,7 +65,6 @@ const coldExponent = 0.33 / 1.33
 /** Geometry of a segment. Volume's two odd powers share one: (V/V₁)^−0.05 to the 11th and to the 26th. */
 export const fillGeometry = (cycle: PreparedCycle, { fromDeg, toDeg, steps }: Segment, nodes: Nodes): void => {
   const { crankRadiusM, lean, pistonAreaM2, cooling, wallAreaM2, wallPerM, startKpa } = cycle
-  const { inverse, spread, warmth, cooling: coolings, motoredKpa } = nodes
   const half = (toDeg - fromDeg) / (2 * steps)
   const turnSin = Math.sin(half * degree)
   const turnCos = Math.cos(half * degree)
@@ -100,30 +89,31 @@ export const fillGeometry = (cycle: PreparedCycle, { fromDeg, toDeg, steps }: Se
     // 1 − cosθ loses digits near the top, where it is small beside the clearance, so they do not matter.
     const travel = crankRadiusM * (1 - cos + (tilt * sin) / (1 + root))
     const volume = cycle.clearanceM3 + pistonAreaM2 * travel
-    inverse[i] = 1 / volume
-    spread[i] = areaPerDeg * sin * (1 + (lean * cos) / root)
-    warmth[i] = volume * perMass
+    const at = perNode * i
+    nodes[at + inverseAt] = 1 / volume
+    nodes[at + spreadAt] = areaPerDeg * sin * (1 + (lean * cos) / root)
+    nodes[at + warmthAt] = volume * perMass
     if (cooling > 0) {
-      const change = i % renewEvery === 0 ? 1 : 1 - volume * (inverse[i - 1] ?? 0)
+      const change = i % renewEvery === 0 ? 1 : 1 - volume * (nodes[at - perNode + inverseAt] ?? 0)
       u = Math.abs(change) < nearOne ? u * rootOfNearOne(change, 0.05) : Math.exp(-0.05 * Math.log(volume * perStart))
       const u2 = u * u
       const u4 = u2 * u2
       const u11 = u4 * u4 * u2 * u
-      coolings[i] = cooling * (wallAreaM2 + wallPerM * travel) * u11
-      motoredKpa[i] = startKpa * u11 * u11 * u4
+      nodes[at + coolingAt] = cooling * (wallAreaM2 + wallPerM * travel) * u11
+      nodes[at + motoredAt] = startKpa * u11 * u11 * u4
     }
   }
 }
 
 /** Rate of heat release over a segment, J per degree. */
-export const fillRelease = (cycle: PreparedCycle, { fromDeg, toDeg, steps }: Segment, release: Float64Array): void => {
+export const fillRelease = (cycle: PreparedCycle, { fromDeg, toDeg, steps }: Segment, nodes: Nodes): void => {
   const { a, m, durationDeg, startDeg } = cycle
   const scale = (cycle.heatJ * a * (m + 1)) / durationDeg
   const half = (toDeg - fromDeg) / (2 * steps)
   for (let i = 0; i <= 2 * steps; i += 1) {
     const z = Math.max(0, (fromDeg + i * half - startDeg) / durationDeg)
     const power = m === 2 ? z * z : z ** m
-    release[i] = scale * power * Math.exp(-a * power * z)
+    nodes[perNode * i + releaseAt] = scale * power * Math.exp(-a * power * z)
   }
 }
 
@@ -135,7 +125,6 @@ export const fillRelease = (cycle: PreparedCycle, { fromDeg, toDeg, steps }: Seg
  * dp/dθ = −γ·p·V′/V + (γ − 1)·(Q′ − Q_w′)/V, γ = 1.338 − 6·10⁻⁵·T + 10⁻⁸·T² unless constant
  */
 export const integrateSegment = (cycle: PreparedCycle, segment: Segment, nodes: Nodes, state: CycleState, recorder: Recorder | null): void => {
-  const { inverse, spread, warmth, cooling, motoredKpa, release } = nodes
   const { wallK, gasMps, gasMpsPerKpa, startKpa, startK, knockPerDeg, gamma: fixedGamma } = cycle
   const { steps, fromDeg, burning, fired } = segment
   const knocking = segment.knocking && knockPerDeg > 0
@@ -157,33 +146,33 @@ export const integrateSegment = (cycle: PreparedCycle, segment: Segment, nodes: 
   // T₁/T_u and the pressure it belongs to, carried from sample to sample.
   let cold = 1
   let knockKpa = Infinity
-  recorder?.open(fromDeg, p, p * 1000 * (warmth[0] ?? 0))
+  recorder?.open(fromDeg, p, p * 1000 * (nodes[warmthAt] ?? 0))
   // Step −1 has its last stage only: the slope at the segment's start.
   for (let k = -1; k < steps; k += 1) {
     let stageSlope = slope
     let slopes = slope
-    let works = k < 0 ? 0 : p * (spread[2 * k] ?? 0)
+    let works = k < 0 ? 0 : p * (nodes[perNode * 2 * k + spreadAt] ?? 0)
     let losses = loss
     for (let stage = k < 0 ? 3 : 0; stage < 4; stage += 1) {
       if (stage === 3) next = p + (h / 6) * (k < 0 ? 0 : slopes)
-      const i = stage < 2 ? 2 * k + 1 : 2 * k + 2
+      const at = perNode * (stage < 2 ? 2 * k + 1 : 2 * k + 2)
       const q = stage === 3 ? next : p + (stage < 2 ? h / 2 : h) * stageSlope
-      const kelvin = q * 1000 * (warmth[i] ?? 0)
+      const kelvin = q * 1000 * (nodes[at + warmthAt] ?? 0)
       const gamma = fixedGamma > 0 ? fixedGamma : 1.338 - 6.0e-5 * kelvin + 1.0e-8 * kelvin * kelvin
       let wallHeat = 0
       if (cooled) {
-        const excess = fired ? q - (motoredKpa[i] ?? 0) : 0
+        const excess = fired ? q - (nodes[at + motoredAt] ?? 0) : 0
         const speed = excess > 0 ? gasMps + gasMpsPerKpa * excess : gasMps
         const change = 1 - speed * root * root * root * root * root
         root = Math.abs(change) < nearOne ? root * rootOfNearOne(change, 0.2) : Math.exp(-0.2 * Math.log(speed))
-        wallHeat = (cooling[i] ?? 0) * Math.sqrt(Math.sqrt(q)) * speed * root * (kelvin - wallK)
+        wallHeat = (nodes[at + coolingAt] ?? 0) * Math.sqrt(Math.sqrt(q)) * speed * root * (kelvin - wallK)
       }
-      const heat = burning ? (release[i] ?? 0) - wallHeat : -wallHeat
-      stageSlope = (inverse[i] ?? 0) * ((gamma - 1) * heat * 1e-3 - gamma * q * (spread[i] ?? 0))
+      const heat = burning ? (nodes[at + releaseAt] ?? 0) - wallHeat : -wallHeat
+      stageSlope = (nodes[at + inverseAt] ?? 0) * ((gamma - 1) * heat * 1e-3 - gamma * q * (nodes[at + spreadAt] ?? 0))
       if (stage < 3) {
         const weight = stage === 2 ? 1 : 2
         slopes += weight * stageSlope
-        works += weight * q * (spread[i] ?? 0)
+        works += weight * q * (nodes[at + spreadAt] ?? 0)
         losses += weight * wallHeat
       } else {
         loss = wallHeat

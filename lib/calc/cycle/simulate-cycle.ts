@@ -27,11 +27,9 @@ export const runCycle = (checked: CheckedCycle): RawCourse => {
   const cycle = prepareCycle(checked)
   const segments = segmentsOf(cycle)
   const samples = segments.reduce((sum, { steps }) => sum + steps, 1)
-  const thetaDeg = new Float64Array(samples)
-  const pressureKpa = new Float64Array(samples)
-  const temperatureK = new Float64Array(samples)
-  const slopeAtStart = new Float64Array(samples)
-  const slopeAtEnd = new Float64Array(samples)
+  // One list for all five: lists are what a short run spends its time on.
+  const course = new Float64Array(5 * samples)
+  const [thetaDeg, pressureKpa, temperatureK, slopeAtStart, slopeAtEnd] = [0, 1, 2, 3, 4].map((i) => course.subarray(i * samples, (i + 1) * samples)) as [Float64Array, Float64Array, Float64Array, Float64Array, Float64Array]
   const state = { pressureKpa: cycle.startKpa, workJ: 0, heatLossJ: 0, knock: 0 }
   const nodes = makeNodes(segments.reduce((most, { steps }) => Math.max(most, steps), 0))
   let count = 0
@@ -54,7 +52,7 @@ export const runCycle = (checked: CheckedCycle): RawCourse => {
   }
   for (const segment of segments) {
     fillGeometry(cycle, segment, nodes)
-    if (segment.burning) fillRelease(cycle, segment, nodes.release)
+    if (segment.burning) fillRelease(cycle, segment, nodes)
     integrateSegment(cycle, segment, nodes, state, recorder)
   }
   const { workJ, heatLossJ, knock } = state

@@ -73,7 +73,7 @@ export const sweepSparks = ({ checked, thetaDeg, states }: Compression, burn: Re
     const fromDeg = thetaDeg[index] ?? ivcDeg
     for (const segment of segmentsOf(cycle, startDeg - fromDeg > hairDeg ? fromDeg : startDeg)) {
       fillGeometry(cycle, segment, nodes)
-      if (segment.burning) fillRelease(cycle, segment, nodes.release)
+      if (segment.burning) fillRelease(cycle, segment, nodes)
       integrateSegment(cycle, segment, nodes, state, null)
     }
     if (!Number.isFinite(state.workJ + state.knock)) throw refuseRunaway(checked)

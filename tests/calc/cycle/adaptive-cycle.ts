@@ -1,11 +1,14 @@
 import { createRequire } from 'node:module'
 import type { CycleInput } from '@/lib/calc'
+import { parabolaTop } from '@/lib/calc/shared/parabola-top'
 
 /** The part of odex that is used: the types in its package do not pass this project's compiler settings, so it is required, not imported. */
 interface Solver {
   absoluteTolerance: number
   relativeTolerance: number
   initialStepSize: number
+  denseOutput: boolean
+  grid(pitch: number, sample: (x: number, y: number[]) => unknown): (step: number, from: number, to: number, y: number[]) => unknown
   solve(
     slope: (x: number, y: number[]) => number[], from: number, start: number[], to: number,
     output?: (step: number, from: number, to: number, y: number[]) => unknown,
@@ -15,9 +18,9 @@ const { Solver } = createRequire(import.meta.url)('odex') as { Solver: new (dime
 
 /**
  * The cycle written a second time, plainly and from the specification's equations, and integrated by an adaptive extrapolation method:
- * pressure, work, heat loss and knock integral at exhaust opening, and the pressure's greatest value.
+ * pressure, work, heat loss and knock integral at exhaust opening, and where samples a pitch apart are asked for the top of the pressure.
  */
-export const adaptiveCycle = ({ engine, rpm, charge, burn, gamma, heatLoss, octane }: CycleInput, tolerance = 1e-12) => {
+export const adaptiveCycle = ({ engine, rpm, charge, burn, gamma, heatLoss, octane }: CycleInput, tolerance = 1e-12, pitchDeg: number | null = null) => {
   const bore = engine.boreMm / 1000
   const radius = engine.strokeMm / 2000
   const rod = engine.rodMm / 1000
@@ -51,7 +54,7 @@ export const adaptiveCycle = ({ engine, rpm, charge, burn, gamma, heatLoss, octa
     return 17.68 * ((octane ?? 100) / 100) ** 3.402 * (p / 101.325) ** -1.7 * Math.exp(3800 / unburned)
   }
   let y = [p1, 0, 0, 0]
-  let peakKpa = 0
+  const [angles, pressures]: [number[], number[]] = [[], []]
   for (const [i, to] of edges.entries()) {
     const from = edges[i - 1]
     if (from === undefined) continue
@@ -59,6 +62,11 @@ export const adaptiveCycle = ({ engine, rpm, charge, burn, gamma, heatLoss, octa
     const solver = new Solver(4)
     solver.absoluteTolerance = solver.relativeTolerance = tolerance
     solver.initialStepSize = 0.01
+    solver.denseOutput = pitchDeg !== null
+    const sample = (deg: number, [p = 0]: number[]) => {
+      angles.push(deg)
+      pressures.push(p)
+    }
     const result = solver.solve((deg: number, [p = 0]: number[]) => {
       const v = volume(deg)
       const kelvin = (p * 1000 * v) / (mass * 287)
@@ -77,8 +85,9 @@ export const adaptiveCycle = ({ engine, rpm, charge, burn, gamma, heatLoss, octa
         loss,
         burn && from < ninety && octane !== undefined ? 1 / tau(p) / (0.006 * rpm) : 0,
       ]
-    }, from, y, to, (_n: number, _x0: number, _x1: number, at: number[]) => { peakKpa = Math.max(peakKpa, at[0] ?? 0) })
+    }, from, y, to, pitchDeg === null ? undefined : solver.grid(pitchDeg, sample))
     y = result.y
   }
-  return { pressureKpa: y[0] ?? 0, workJ: y[1] ?? 0, heatLossJ: y[2] ?? 0, knock: y[3] ?? 0, peakSampleKpa: peakKpa, heatJ: heat, startVolumeM3: v1, endVolumeM3: volume(engine.evoDeg) }
+  const highest = pressures.reduce((best, p, i) => (p > (pressures[best] ?? 0) ? i : best), 0)
+  return { pressureKpa: y[0] ?? 0, workJ: y[1] ?? 0, heatLossJ: y[2] ?? 0, knock: y[3] ?? 0, peakKpa: pitchDeg === null ? null : parabolaTop(angles, pressures, highest).value, heatJ: heat, startVolumeM3: v1, endVolumeM3: volume(engine.evoDeg) }
 }
