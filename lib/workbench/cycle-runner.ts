@@ -80,11 +80,13 @@ export function createCycleRunner({ startWorker: start, computeHere: here }: Run
     }
     // Its script did not load, or it broke: the page does it from now on.
     runs.onerror = () => {
+      // A worker that was ended may still complain: that says nothing about the next one.
+      if (asked !== newest) return
       end()
       hasWorkers = false
       runs.terminate()
       worker = null
-      if (asked === newest) inPage(request, asked, take)
+      inPage(request, asked, take)
     }
     runs.postMessage(request)
   }

@@ -36,7 +36,7 @@ export interface CycleModel {
   /** The closed cycle of one cylinder at a speed, charge pressure and spark; the burn follows speed and pressure. */
   readonly inputAt: (rpm: number, pressureKpa: number, sparkDeg: number, changes?: { hotterK?: number, octane?: number }) => CycleInput
   /** Full throttle, or the propeller's load where that is smaller. */
-  readonly carriedAt: (rpm: number) => CarriedPoint
+  readonly carriedAt: (rpm: number, throttle?: 'asFlown' | 'full') => CarriedPoint
   /** Full throttle at full-power speed: where the burn was calibrated. */
   readonly full: CarriedPoint
   readonly volumetricEfficiency: number
@@ -107,12 +107,12 @@ export function cycleModel(scenario: ReadyScenario): CycleModel {
     volumetricEfficiency: fullKpa / perEfficiencyKpa,
     mismatch: typedKpa === null ? 0 : madeKw / fullKw - 1,
     inputAt: (rpm, pressureKpa, sparkDeg, changes) => inputWith(burnAt(rpm, pressureKpa), rpm, pressureKpa, sparkDeg, changes),
-    carriedAt: (rpm) => {
+    carriedAt: (rpm, throttle = 'asFlown') => {
       if (rpm === maxRpm) return full
       const throttleKw = fullKwAt(rpm)
       const loadKw = Math.max(...sheet.propeller.pitches.map((pitch) => pitchLoadKw(pitch, rpm)))
       // The coarsest pitch known asks for most; a constant-speed propeller whose high stop is not known may ask for all there is.
-      const isThrottled = loadKw < throttleKw && (sheet.propeller.kind === 'fixedPitch' || sheet.propeller.pitches.length > 1)
+      const isThrottled = throttle === 'asFlown' && loadKw < throttleKw && (sheet.propeller.kind === 'fixedPitch' || sheet.propeller.pitches.length > 1)
       const powerKw = isThrottled ? loadKw : throttleKw
       const sparkDeg = isThrottled ? scenario.advance('primary', rpm, sheet.manifold.fullKpa) : powerTimingDeg
       const pressureKpa = typedKpa ?? solve(rpm, powerKw, sparkDeg, (kpa) => burnAt(rpm, kpa))

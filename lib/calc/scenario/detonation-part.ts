@@ -130,7 +130,7 @@ export function octaneShiftOf({ sheet, engine }: ReadyScenario, model: CycleMode
   if (reference === null) return 0
   if (reference.rpm < engine.idleRpm || reference.rpm > engine.maxRpm)
     throw withheld('runUpOutside', 'sheet.reference.rpm', `The reference setting must lie between idle, ${engine.idleRpm} rpm, and full power, ${engine.maxRpm} rpm.`, reference.rpm, `${engine.idleRpm} … ${engine.maxRpm}`)
-  const { pressureKpa } = model.carriedAt(reference.rpm)
+  const { pressureKpa } = model.carriedAt(reference.rpm, 'full')
   const sweep = sweepAt(model, reference.rpm, pressureKpa, 0)
   const limitDeg = reference.sparkDeg + reference.marginDeg
   if (limitDeg > sweep.toDeg || limitDeg < sweep.fromDeg)

@@ -51,6 +51,7 @@ describe('charge and power belong together', () => {
     expectClose(at('fixedPitch', pitches.slice(0, 1)), 40 * (1600 / 2780) ** 3, { rel: 1e-12 })
     expectClose(at('constantSpeed', pitches), 60 * (1600 / 2400) ** 3, { rel: 1e-12 })
     expectClose(at('constantSpeed', pitches.slice(0, 1)), 20 + (12.5 * 400) / 600, { rel: 1e-12 })
+    expectClose(cycleModel(readyScenario(scenario())).carriedAt(1600, 'full').powerKw, 20 + (12.5 * 400) / 600, { rel: 1e-12 })
   })
 
   test('the burn is calibrated: the cycle’s own best spark is the one stated', () => {
