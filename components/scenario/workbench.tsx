@@ -67,7 +67,9 @@ export function Workbench(props: WorkbenchProps) {
     },
     onEngineChanged: (engine) => setContext({ ...now, engine: engine.spec }),
   })
-  const shown = useDeferredValue(live.result)
+  // Ledgers and curves follow when finding and wheel are painted.
+  const later = useDeferredValue(live)
+  const shown = later.result
   const scenarioNow = useMemo(() => ({ engine: now.engine, sheet: live.sheet }), [now.engine, live.sheet])
   const shownScenario = useDeferredValue(scenarioNow)
   const flagged = useMemo(() => flaggedFields(live.result.findings, live.values), [live.result.findings, live.values])
@@ -109,9 +111,9 @@ export function Workbench(props: WorkbenchProps) {
           <SheetNotices notices={shown.notices} engineChanged={props.engineChanged} archived={scenario.archived} canWrite={scenario.canWrite} />
           <TimingDrawings scenario={scenarioNow} result={live.result} deferred={shown} stale={live.stale} system={system} name={scenario.code} />
           <FindingsList findings={live.result.findings} staleFindings={live.staleFindings} pendingFindings={live.pendingFindings} system={system} />
-          <ResultLedgers parts={shown.parts} stale={live.stale} pending={live.pending} scenario={shownScenario} system={system} />
-          <SpeedPlots parts={shown.parts} stale={live.stale} scenario={shownScenario} system={system} name={scenario.code} />
-          <SparkMapSection scenario={shownScenario} parts={shown.parts} pending={live.pending} limits={limits} system={system} name={scenario.code} values={live.values} onChange={edit} />
+          <ResultLedgers parts={shown.parts} stale={later.stale} pending={later.pending} scenario={shownScenario} system={system} />
+          <SpeedPlots parts={shown.parts} stale={later.stale} scenario={shownScenario} system={system} name={scenario.code} />
+          <SparkMapSection scenario={shownScenario} parts={shown.parts} pending={later.pending} limits={limits} system={system} name={scenario.code} values={later.values} onChange={edit} />
           <p className="fine">Judged by the program’s default limits, each named beside its finding; they are this shop’s to choose, no authority’s. These figures compare settings of one engine; they clear none for flight: ground-run, then flight-test as your rules and licensed practice say.</p>
         </div>
       </div>

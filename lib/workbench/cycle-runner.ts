@@ -16,8 +16,8 @@ export interface RunnerParts {
   computeHere: (request: CycleRequest) => Promise<CycleAnswer>
 }
 
-/** A pause in the typing after which a run is worth its start, ms. */
-const pauseMs = 30
+/** A pause in the typing after which a run is worth its start, ms: shorter, and it would take the processor from the next key's paint. */
+const pauseMs = 140
 
 const startWorker = (): Worker | null => {
   try {

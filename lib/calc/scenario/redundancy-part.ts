@@ -13,8 +13,18 @@ const heated: ReadonlySet<RedundancyPart> = new Set(['trigger', 'module', 'coil'
 /** Each guessed rate at a tenth and ten times: what the answer rests on. */
 const spread = [1, 0.1, 10] as const
 
+/** The newest answer with what it stands on: most edits of a sheet leave the chain as it is, and its diagrams are the dearest of the closed forms. */
+let newest: { readonly key: string, readonly figures: PartFigures<'redundancy'> } | null = null
+
 /** Chances of losing all spark, a channel, a cylinder, an hour of flight; from the chain of parts as the sheet describes it. */
 export function redundancyPart(scenario: Scenario): PartFigures<'redundancy'> {
+  const { distribution, selection, redundancy } = scenario.sheet
+  const key = JSON.stringify([scenario.engine.cylinders, distribution, selection, redundancy])
+  if (newest?.key !== key) newest = { key, figures: computeRedundancy(scenario) }
+  return structuredClone(newest.figures)
+}
+
+function computeRedundancy(scenario: Scenario): PartFigures<'redundancy'> {
   const { redundancy } = scenario.sheet
   const trees = spread.map((factor) => treesOf(scenario, factor))
   const rows = trees.map((tree) => chances(tree, redundancy.flightHours))
