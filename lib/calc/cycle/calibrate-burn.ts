@@ -1,4 +1,5 @@
 import { CalcError } from '../calc-error'
+import { rootBetween } from '../shared/root-between'
 import { takeNumber, takeOptionalNumber } from '../validate/number'
 import { membersOf } from '../validate/shape'
 import { checkCycle } from './check-cycle'
@@ -60,32 +61,14 @@ export const calibrateBurn = (input: CycleInput, target: CalibrateBurnTarget): B
     const best = bestOnGrid(sweep, sparkGrid(sweep))
     return best !== null && Math.abs(best.sparkDeg - mbtDeg) <= 0.01
   }
-  let [low, high] = [shortestDeg, longestDeg]
-  let [atLow, atHigh] = [slope(low), slope(high)]
+  const [atLow, atHigh] = [slope(shortestDeg), slope(longestDeg)]
   // A longer burn wants an earlier spark: the slope rises with the total. At an end itself its sign is rounding.
   if (!(atLow < 0 && atHigh > 0)) {
     const end = atLow < 0 ? longestDeg : shortestDeg
     if (givesMbt(end)) return anglesOf(end)
     throw refuse()
   }
-  let side = 0
-  for (let i = 0; i < 60 && high - low > 1e-4; i += 1) {
-    let middle = (low * atHigh - high * atLow) / (atHigh - atLow)
-    if (!(middle > low && middle < high)) middle = (low + high) / 2
-    const atMiddle = slope(middle)
-    if (atMiddle < 0) {
-      low = middle
-      atLow = atMiddle
-      if (side === -1) atHigh /= 2
-      side = -1
-    } else {
-      high = middle
-      atHigh = atMiddle
-      if (side === 1) atLow /= 2
-      side = 1
-    }
-  }
-  const totalDeg = (low + high) / 2
+  const totalDeg = rootBetween(slope, shortestDeg, longestDeg, 1e-4, { atFrom: atLow, atTo: atHigh })
   if (!givesMbt(totalDeg)) throw refuse()
   return anglesOf(totalDeg)
 }

@@ -1,4 +1,5 @@
 import { CalcError } from '../calc-error'
+import { rootBetween } from '../shared/root-between'
 import { checkCycle, type CheckedCycle } from './check-cycle'
 import type { CycleInput } from './cycle-types'
 import { sparkGrid } from './spark-grid'
@@ -18,29 +19,9 @@ export const takeOctane = (checked: CheckedCycle): number => {
 
 const level = (knock: number): number => Math.log(knock)
 
-/** Where f passes 0 between two sparks, f(low) < 0 ≤ f(high): the method of false position with halved ends, to a thousandth of a degree. */
-const settle = (f: (sparkDeg: number) => number, lowDeg: number, fLow: number, highDeg: number, fHigh: number): number => {
-  let [a, fa, b, fb] = [lowDeg, fLow, highDeg, fHigh]
-  let side = 0
-  for (let i = 0; i < 60 && b - a > 1e-3; i += 1) {
-    let x = (a * fb - b * fa) / (fb - fa)
-    if (!(x > a && x < b)) x = (a + b) / 2
-    const fx = f(x)
-    if (Math.abs(fx) < 1e-9) return x
-    if (fx < 0) {
-      a = x
-      fa = fx
-      if (side === -1) fb /= 2
-      side = -1
-    } else {
-      b = x
-      fb = fx
-      if (side === 1) fa /= 2
-      side = 1
-    }
-  }
-  return b
-}
+/** Where f passes 0 between two sparks, f(low) < 0 ≤ f(high), to a thousandth of a degree. */
+const settle = (f: (sparkDeg: number) => number, lowDeg: number, fLow: number, highDeg: number, fHigh: number): number =>
+  rootBetween(f, lowDeg, highDeg, 1e-3, { close: 1e-9, atFrom: fLow, atTo: fHigh })
 
 /**
  * The first spark, coming from the late end, at which knock·scale passes 1. The integral turns down again beyond about 45°: between two samples below 1

@@ -1,6 +1,7 @@
 import { densityAltitudeM } from '../air/density-altitude'
 import { powerAtDensityRatio } from '../air/lapsed-power'
 import { standardAtmosphere } from '../air/standard-atmosphere'
+import { rootBetween } from '../shared/root-between'
 import { bestClimb } from '../climb/best-climb'
 import { deadCylinderPower } from '../dead-cylinder/dead-cylinder-power'
 import { curvePowerKw, frictionPowerAt, fullThrottleCurve, refuseTwoPlugs, timingRatioOf } from './power-parts'
@@ -67,27 +68,9 @@ export function climbPart(scenario: ReadyScenario): { densityAltitudeM: number; 
   return { densityAltitudeM: place, densityRatio, rows: (['primary', 'backup', 'oneCold'] as const).map(rowOf) }
 }
 
-/** Density altitude of no climb; null when it climbs or sinks at every one. False position with halved ends: the climb falls almost evenly. */
+/** Density altitude of no climb; null when it climbs or sinks at every one. */
 function ceilingOf(climbAt: (altitudeM: number) => number): number | null {
-  let [low, high] = [lowestM, highestM]
-  let [atLow, atHigh] = [climbAt(low), climbAt(high)]
+  const [atLow, atHigh] = [climbAt(lowestM), climbAt(highestM)]
   if (atLow <= 0 || atHigh >= 0) return null
-  let side = 0
-  for (let i = 0; i < 50 && high - low > settledM; i += 1) {
-    const middle = (low * atHigh - high * atLow) / (atHigh - atLow)
-    const at = climbAt(middle)
-    if (Math.abs(at) < 1e-4) return middle
-    if (at > 0) {
-      low = middle
-      atLow = at
-      if (side === 1) atHigh /= 2
-      side = 1
-    } else {
-      high = middle
-      atHigh = at
-      if (side === -1) atLow /= 2
-      side = -1
-    }
-  }
-  return (low + high) / 2
+  return rootBetween(climbAt, lowestM, highestM, settledM, { close: 1e-4, atFrom: atLow, atTo: atHigh })
 }

@@ -5,6 +5,7 @@ import { combustionEfficiency } from '../cycle/combustion-efficiency'
 import type { CycleInput } from '../cycle/cycle-types'
 import { scaleBurn, type BurnAngles } from '../cycle/scale-burn'
 import { simulateCycle } from '../cycle/simulate-cycle'
+import { rootBetween } from '../shared/root-between'
 import type { CycleEngine } from '../geometry/cycle-engine'
 import { mepFromPower, powerFromMep } from '../dead-cylinder/mean-effective-pressure'
 import { withheld } from './part'
@@ -130,30 +131,12 @@ const calibrated = (input: CycleInput, mbtDeg: number, delayShare: number): Burn
   }
 }
 
-/** The charge pressure at which a mean effective pressure that grows with it is met: secant steps within a bracket. */
+/** The charge pressure at which a mean effective pressure that grows with it is met. */
 function solveCharge(excessAt: (kpa: number) => number, rpm: number, powerKw: number): number {
-  let [low, high] = [thinnestKpa, densestKpa]
-  let [atLow, atHigh] = [excessAt(low), excessAt(high)]
+  const [atLow, atHigh] = [excessAt(thinnestKpa), excessAt(densestKpa)]
   if (!(atLow < 0 && atHigh > 0)) {
     throw withheld('chargeUnsolved', 'engine.ratedPowerKw', `No charge between ${thinnestKpa} and ${densestKpa} kPa at inlet closing makes ${powerKw.toFixed(1)} kW at ${rpm.toFixed(0)} rpm in this engine.`, powerKw)
   }
-  let side = 0
-  for (let i = 0; i < 40 && high - low > 1e-6 * high; i += 1) {
-    const kpa = (low * atHigh - high * atLow) / (atHigh - atLow)
-    const at = excessAt(kpa)
-    // A thousandth of a kilopascal of mean pressure is beyond any figure shown.
-    if (Math.abs(at) < 1e-4) return kpa
-    if (at < 0) {
-      low = kpa
-      atLow = at
-      if (side === -1) atHigh /= 2
-      side = -1
-    } else {
-      high = kpa
-      atHigh = at
-      if (side === 1) atLow /= 2
-      side = 1
-    }
-  }
-  return (low + high) / 2
+  // A ten-thousandth of a kilopascal of mean pressure is beyond any figure shown.
+  return rootBetween(excessAt, thinnestKpa, densestKpa, 1e-4, { close: 1e-4, atFrom: atLow, atTo: atHigh })
 }

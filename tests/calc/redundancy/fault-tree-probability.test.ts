@@ -40,7 +40,7 @@ describe('faultTreeProbability', () => {
     expectClose(faultTreeProbability(tree), byHand(tree), { rel: 1e-12 })
   })
 
-  it('grows, or stays, as any event grows; its complement is that of the tree turned about', () => {
+  it('grows, or stays, as each event grows; its complement is that of the tree turned about', () => {
     const p = fc.array(fc.double({ min: 0, max: 1, noNaN: true }), { minLength: 7, maxLength: 7 })
     const withChances = (chances: readonly number[], turned = false): FaultTree => ({
       ...repeated,
